@@ -1,0 +1,90 @@
+package tideband.design;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import tideband.oxide.Bath;
+import tideband.oxide.Metal;
+
+/**
+ * A bath's file: JSON in UTF-8 with {@code "format": "tideband-bath"}, as a fit to coupons leaves it. Its keys and limits
+ * are written down in the JSON Schema {@code tideband-bath.schema.json} beside this class.
+ */
+public final class BathFile {
+
+    private BathFile() {}
+
+    /**
+     * Reads a bath.
+     *
+     * @param file the file
+     * @return the bath or every fault
+     */
+    public static Reading<Bath> read(Path file) {
+        Faults faults = new Faults();
+        Optional<byte[]> bytes = JsonText.bytes(file, faults);
+        return bytes.isPresent() ? read(bytes.get()) : new Reading.Faulty<>(faults.list());
+    }
+
+    /**
+     * Reads a bath from memory.
+     *
+     * @param bytes the file's content
+     * @return the bath or every fault
+     */
+    public static Reading<Bath> read(byte[] bytes) {
+        Faults faults = new Faults();
+        Optional<JsonNode> root = JsonText.parse(bytes, faults);
+        return root.isPresent() ? bath(root.get(), faults) : new Reading.Faulty<>(faults.list());
+    }
+
+    private static Reading<Bath> bath(JsonNode root, Faults faults) {
+        Optional<Members> found = Members.of(
+                root,
+                "",
+                faults,
+                List.of(
+                        "format",
+                        "version",
+                        "name",
+                        "metal",
+                        "nm_per_volt",
+                        "field_slope",
+                        "native_nm",
+                        "efficiency",
+                        "resistance_ohm",
+                        "ceiling_volts",
+                        "index_scale",
+                        "source"));
+        if (found.isEmpty()) {
+            return new Reading.Faulty<>(faults.list());
+        }
+        Members bath = found.get();
+        bath.require("format", "version", "name", "metal", "nm_per_volt", "field_slope");
+        bath.require("native_nm", "efficiency", "resistance_ohm", "ceiling_volts");
+        bath.checkFormat("tideband-bath");
+        Optional<String> name = bath.line("name");
+        Optional<Metal> metal = bath.word("metal", List.of(Metal.values()), Metal::key);
+        OptionalDouble nmPerVolt = bath.number("nm_per_volt", 0.1, 20);
+        OptionalDouble fieldSlope = bath.number("field_slope", 5, 200);
+        OptionalDouble nativeNm = bath.number("native_nm", 0.1, 20);
+        OptionalDouble efficiency = bath.number("efficiency", 0.01, 1);
+        OptionalDouble resistanceOhm = bath.number("resistance_ohm", 0, 10_000);
+        OptionalDouble ceilingVolts = bath.number("ceiling_volts", 1, 500);
+        OptionalDouble indexScale = bath.number("index_scale", 0.5, 1.5);
+        Optional<String> source = bath.paragraph("source");
+        return faults.orElse(() -> new Bath(
+                name.orElseThrow(),
+                metal.orElseThrow(),
+                nmPerVolt.getAsDouble(),
+                fieldSlope.getAsDouble(),
+                nativeNm.getAsDouble(),
+                efficiency.getAsDouble(),
+                resistanceOhm.getAsDouble(),
+                ceilingVolts.getAsDouble(),
+                indexScale.orElse(1),
+                source.orElse("not stated")));
+    }
+}
