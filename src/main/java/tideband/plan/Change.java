@@ -1,0 +1,29 @@
+package tideband.plan;
+
+import java.util.EnumSet;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import tideband.piece.End;
+
+/**
+ * A change of holding that lets a band be finished.
+ *
+ * @param alsoDown an end that must be allowed to go down too
+ * @param dryMm the longest dry length that works, in mm
+ */
+public record Change(Optional<End> alsoDown, OptionalDouble dryMm) {
+
+    /**
+     * Makes the change.
+     *
+     * @param problem the problem as it was
+     * @return the problem held otherwise; its dry length is never made longer
+     */
+    public Problem applyTo(Problem problem) {
+        Set<End> ends = EnumSet.copyOf(problem.endsDown());
+        alsoDown.ifPresent(ends::add);
+        double dry = Math.min(problem.dryMm(), dryMm.orElse(problem.dryMm()));
+        return new Problem(problem.stretches(), problem.names(), ends, dry, problem.times(), problem.order());
+    }
+}
