@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
+import java.util.stream.Collectors;
 import tideband.piece.End;
 
 /**
@@ -61,7 +62,8 @@ final class Hindrances {
         String reason = problem.nameOf(band) + " cannot be finished: " + String.join(", and ", reasons);
         List<Change> changes = changes(problem, band);
         List<String> words = changes.stream().map(Hindrances::words).toList();
-        return new Hindrance(OptionalInt.of(band), reason, String.join(", or ", words), changes);
+        return new Hindrance(
+                OptionalInt.of(band), reason, words.stream().distinct().collect(Collectors.joining(", or ")), changes);
     }
 
     /** One change an end that could do: first those that ask for least, then end A before B. */
