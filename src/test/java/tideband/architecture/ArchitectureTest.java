@@ -48,11 +48,31 @@ class ArchitectureTest {
         MAY_KNOW.put(
                 "sheet",
                 Set.of("colour", "optics", "oxide", "piece", "design", "match", "plan", "pull", "trial", "bench"));
+        MAY_KNOW.put("edit", Set.of("colour", "optics", "oxide", "piece", "design"));
+        MAY_KNOW.put("document", Set.of("colour", "optics", "oxide", "piece", "design", "edit"));
+        MAY_KNOW.put("pacer", Set.of("oxide", "piece", "design", "plan", "pull", "bench", "sheet"));
+        MAY_KNOW.put(
+                "window",
+                Set.of(
+                        "colour",
+                        "optics",
+                        "oxide",
+                        "piece",
+                        "design",
+                        "match",
+                        "plan",
+                        "pull",
+                        "trial",
+                        "bench",
+                        "sheet",
+                        "edit",
+                        "document",
+                        "pacer"));
         MAY_KNOW.put(
                 "cli",
                 Set.of(
                         "colour", "optics", "oxide", "piece", "design", "match", "plan", "pull", "trial", "bench",
-                        "sheet"));
+                        "sheet", "window"));
     }
 
     private static String roomOf(String packageName) {
@@ -87,6 +107,7 @@ class ArchitectureTest {
                     .check(ALL);
         });
         slices().matching("tideband.(*)..").should().beFreeOfCycles().check(ALL);
+        slices().matching("tideband.window.(*)..").should().beFreeOfCycles().check(ALL);
     }
 
     @Test
@@ -96,6 +117,23 @@ class ArchitectureTest {
         keep("com.fasterxml.jackson..", "design", "sheet");
         keep("picocli..", "cli");
         keep("java.awt..", "sheet");
+        keep("javafx..", "window");
+    }
+
+    @Test
+    void viewModelsKnowNoViews() {
+        noClasses()
+                .that()
+                .haveNameMatching(".*Model(\\$.*)?")
+                .should()
+                .dependOnClassesThat()
+                .resideInAnyPackage(
+                        "javafx.scene..", "javafx.stage..", "javafx.application..", "tideband.window.look..")
+                .orShould()
+                .dependOnClassesThat()
+                .haveNameMatching(".*View(\\$.*)?")
+                .because("what a view-model decides must be testable without a screen (decision 0005)")
+                .check(ALL);
     }
 
     private static void keep(String library, String... rooms) {

@@ -1,0 +1,2 @@
+/** Designs as documents on disk, without a screen. */
+package tideband.document;

@@ -1,0 +1,2 @@
+/** Editing a drawing, without a screen. */
+package tideband.edit;

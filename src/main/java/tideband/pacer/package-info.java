@@ -1,0 +1,2 @@
+/** Paces the hand through one immersion, without a screen. */
+package tideband.pacer;

@@ -1,0 +1,2 @@
+/** The drawing window: JavaFX lives here and nowhere else. */
+package tideband.window;
