@@ -8,22 +8,12 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
-import java.util.regex.Pattern;
 import tideband.colour.Lab;
-import tideband.colour.Srgb;
 import tideband.colour.Viewing;
 
 /** Reads the bands of a design. */
 final class BandsReader {
 
-    /** A colour in hexadecimal notation. */
-    static final Pattern HEX_COLOUR = Pattern.compile("^#[0-9a-fA-F]{6}$");
-
-    private static final int MOST_BANDS = 60;
-    private static final double SHORTEST_MM = 0.5;
-    private static final double THICKEST_NM = 2000;
-    private static final double MOST_VOLTS = 500;
-    private static final int HIGHEST_ORDER = 20;
     private static final double LEEWAY_MM = 1e-6;
 
     private static final List<String> WANTED_KEYS = List.of("film_nm", "volts", "colour", "bare");
@@ -38,7 +28,7 @@ final class BandsReader {
 
     /** The bands; of account only when no fault was found. */
     List<Band> bands(Members design, OptionalDouble lengthMm) {
-        List<JsonNode> elements = design.array("bands", 1, MOST_BANDS).orElse(List.of());
+        List<JsonNode> elements = design.array("bands", 1, Limits.MOST_BANDS).orElse(List.of());
         List<Band> bands = new ArrayList<>();
         Map<String, String> pointerOfName = new HashMap<>();
         double fromMm = 0;
@@ -59,7 +49,7 @@ final class BandsReader {
                         "is " + Shown.quoted(name) + ", the name of " + earlier + " too",
                         "give every band a name of its own");
             }
-            OptionalDouble givenMm = band.number("to_mm", 0, PieceReader.LONGEST_MM);
+            OptionalDouble givenMm = band.number("to_mm", Limits.AT_MM);
             boolean last = i == elements.size() - 1;
             double toMm = givenMm.isPresent() ? toMm(band, givenMm.getAsDouble(), fromMm, lengthMm, last) : fromMm;
             Optional<Wanted> wanted = wanted(band, at);
@@ -73,12 +63,12 @@ final class BandsReader {
     }
 
     private static double toMm(Members band, double toMm, double fromMm, OptionalDouble lengthMm, boolean last) {
-        if (toMm - fromMm < SHORTEST_MM - LEEWAY_MM) {
+        if (toMm - fromMm < Limits.SHORTEST_BAND_MM - LEEWAY_MM) {
             band.fault(
                     "to_mm",
                     "is " + Shown.number(toMm),
                     "bands run from end A to end B and are at least 0.5 mm long, so it must be at least "
-                            + Shown.number(fromMm + SHORTEST_MM));
+                            + Shown.number(fromMm + Limits.SHORTEST_BAND_MM));
         }
         if (last && lengthMm.isPresent()) {
             if (!(Math.abs(toMm - lengthMm.getAsDouble()) <= LEEWAY_MM)) {
@@ -100,7 +90,7 @@ final class BandsReader {
         List<String> given = WANTED_KEYS.stream().filter(band::has).toList();
         Optional<Wanted> film = band.has("film_nm") ? film(band) : Optional.empty();
         Optional<Wanted> volts = volts(band);
-        OptionalInt order = band.whole("order", 1, HIGHEST_ORDER);
+        OptionalInt order = band.whole("order", (int) Limits.ORDER.low(), (int) Limits.ORDER.high());
         Optional<Wanted> colour = band.has("colour") ? colour(band, order) : Optional.empty();
         Optional<Wanted> bare = bare(band);
         if (band.has("order") && !band.has("colour")) {
@@ -141,11 +131,11 @@ final class BandsReader {
             faults.add(at, "is 0", "say \"bare\": true for natural metal; a film is a number from 1 to 2000");
             return OptionalDouble.empty();
         }
-        return band.number(node, at, 1, THICKEST_NM);
+        return band.number(node, at, Limits.FILM_NM);
     }
 
     private static Optional<Wanted> volts(Members band) {
-        OptionalDouble volts = band.number("volts", 0.1, MOST_VOLTS);
+        OptionalDouble volts = band.number("volts", Limits.BAND_VOLTS);
         return volts.isPresent() ? Optional.of(new Wanted.Volts(volts.getAsDouble())) : Optional.empty();
     }
 
@@ -163,9 +153,8 @@ final class BandsReader {
 
     private Optional<Wanted> colour(Members band, OptionalInt order) {
         JsonNode node = band.value("colour").orElseThrow();
-        if (node.isTextual() && HEX_COLOUR.matcher(node.textValue()).matches()) {
-            String hex = node.textValue();
-            return Optional.of(new Wanted.Colour(hex, viewing.lab(Srgb.ofHex(hex)), order));
+        if (node.isTextual() && Wanted.Colour.isHex(node.textValue())) {
+            return Optional.of(Wanted.Colour.ofHex(node.textValue(), viewing, order));
         }
         if (!node.isObject()) {
             band.fault(
@@ -182,15 +171,13 @@ final class BandsReader {
             return Optional.empty();
         }
         String at = colour.pointer("lab");
-        OptionalDouble l = colour.number(lab.get().get(0), at + "/0", 0, 100);
-        OptionalDouble a = colour.number(lab.get().get(1), at + "/1", -200, 200);
-        OptionalDouble b = colour.number(lab.get().get(2), at + "/2", -200, 200);
+        OptionalDouble l = colour.number(lab.get().get(0), at + "/0", Limits.LIGHTNESS);
+        OptionalDouble a = colour.number(lab.get().get(1), at + "/1", Limits.CHROMATIC);
+        OptionalDouble b = colour.number(lab.get().get(2), at + "/2", Limits.CHROMATIC);
         if (l.isEmpty() || a.isEmpty() || b.isEmpty()) {
             return Optional.empty();
         }
         Lab value = new Lab(l.getAsDouble(), a.getAsDouble(), b.getAsDouble());
-        String text = "lab(" + Shown.number(value.lightness()) + ", " + Shown.number(value.a()) + ", "
-                + Shown.number(value.b()) + ")";
-        return Optional.of(new Wanted.Colour(text, value, order));
+        return Optional.of(Wanted.Colour.ofLab(value, order));
     }
 }

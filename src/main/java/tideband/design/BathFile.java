@@ -5,6 +5,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import tideband.design.JsonWriter.Inline;
 import tideband.oxide.Bath;
 import tideband.oxide.Metal;
 
@@ -13,6 +14,8 @@ import tideband.oxide.Metal;
  * are written down in the JSON Schema {@code tideband-bath.schema.json} beside this class.
  */
 public final class BathFile {
+
+    static final String FORMAT = "tideband-bath";
 
     private BathFile() {}
 
@@ -40,7 +43,53 @@ public final class BathFile {
         return root.isPresent() ? bath(root.get(), faults) : new Reading.Faulty<>(faults.list());
     }
 
+    /**
+     * Whether a file can hold a bath: its name and its source stand on one line each and are not too long.
+     *
+     * @param bath the bath
+     * @return whether it can be written and read again
+     */
+    public static boolean canHold(Bath bath) {
+        return Members.LINE_OF_TEXT.matcher(bath.name()).matches()
+                && Members.PARAGRAPH.matcher(bath.source()).matches();
+    }
+
+    /**
+     * Writes a bath.
+     *
+     * @param bath the bath
+     * @return the content of its file: UTF-8, always the same for the same bath; read again, it gives an equal one if
+     *     {@link #canHold}
+     */
+    public static byte[] bytes(Bath bath) {
+        return new JsonWriter()
+                .line(new Inline()
+                        .text("format", FORMAT)
+                        .number("version", Members.VERSION)
+                        .text("name", bath.name()))
+                .line(new Inline().text("metal", bath.metal().key()))
+                .line(new Inline()
+                        .number("nm_per_volt", bath.nmPerVolt())
+                        .number("field_slope", bath.fieldSlope())
+                        .number("native_nm", bath.nativeNm())
+                        .number("efficiency", bath.efficiency())
+                        .number("resistance_ohm", bath.resistanceOhm()))
+                .line(new Inline()
+                        .number("ceiling_volts", bath.ceilingVolts())
+                        .number("index_scale", bath.indexScale()))
+                .line(new Inline().text("source", bath.source()))
+                .bytes();
+    }
+
     private static Reading<Bath> bath(JsonNode root, Faults faults) {
+        if (Members.isOther(
+                root,
+                DesignReader.FORMAT,
+                faults,
+                "this is a design, not a bath",
+                "take a bath file, one that begins with \"format\": \"tideband-bath\"")) {
+            return new Reading.Faulty<>(faults.list());
+        }
         Optional<Members> found = Members.of(
                 root,
                 "",
@@ -64,7 +113,7 @@ public final class BathFile {
         Members bath = found.get();
         bath.require("format", "version", "name", "metal", "nm_per_volt", "field_slope");
         bath.require("native_nm", "efficiency", "resistance_ohm", "ceiling_volts");
-        bath.checkFormat("tideband-bath");
+        bath.checkFormat(FORMAT);
         Optional<String> name = bath.line("name");
         Optional<Metal> metal = bath.word("metal", List.of(Metal.values()), Metal::key);
         OptionalDouble nmPerVolt = bath.number("nm_per_volt", 0.1, 20);

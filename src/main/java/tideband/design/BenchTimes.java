@@ -22,5 +22,11 @@ public record BenchTimes(double immersionMin, double maskMin, double maskOverMin
                 throw new IllegalArgumentException("bench times must be from 0 to 1000000 min, but one was " + minutes);
             }
         }
+        // Minus zero becomes zero.
+        immersionMin += 0.0;
+        maskMin += 0.0;
+        maskOverMin += 0.0;
+        stripMin += 0.0;
+        turnMin += 0.0;
     }
 }

@@ -1,7 +1,6 @@
 package tideband.design;
 
 import com.fasterxml.jackson.databind.JsonNode;
-import java.nio.file.Path;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
@@ -11,7 +10,6 @@ import tideband.colour.Illuminant;
 import tideband.colour.Observer;
 import tideband.colour.Viewing;
 import tideband.optics.Finish;
-import tideband.oxide.Bath;
 import tideband.oxide.Metal;
 import tideband.oxide.Supply;
 import tideband.piece.End;
@@ -21,17 +19,26 @@ import tideband.piece.Vessel;
 /** Turns the JSON tree of a design into a design, or into its faults. */
 final class DesignReader {
 
-    private static final double MOST_MINUTES = 1e6;
+    static final String FORMAT = "tideband-design";
 
     private final Faults faults;
-    private final Optional<Path> folder;
+    private final BathChoice baths;
 
-    DesignReader(Faults faults, Optional<Path> folder) {
+    DesignReader(Faults faults, BathChoice baths) {
         this.faults = faults;
-        this.folder = folder;
+        this.baths = baths;
     }
 
     Reading<Design> read(JsonNode root) {
+        if (Members.isOther(
+                root,
+                BathFile.FORMAT,
+                faults,
+                "this is a bath, not a design",
+                "open a design; to use this bath, put its file beside the design and give the file's name under"
+                        + " \"bath\" there")) {
+            return new Reading.Faulty<>(faults.list());
+        }
         List<String> known = List.of(
                 "format",
                 "version",
@@ -54,7 +61,7 @@ final class DesignReader {
         }
         Members design = found.get();
         design.require("format", "version", "title", "metal", "piece", "bands");
-        design.checkFormat("tideband-design");
+        design.checkFormat(FORMAT);
         Optional<String> title = design.line("title");
         Optional<Metal> metal = design.word("metal", List.of(Metal.values()), Metal::key);
         Finish finish =
@@ -69,7 +76,7 @@ final class DesignReader {
         OptionalDouble lengthMm =
                 piece.isPresent() ? OptionalDouble.of(piece.get().lengthMm()) : OptionalDouble.empty();
         List<Band> bands = new BandsReader(faults, Viewing.of(light, observer)).bands(design, lengthMm);
-        Optional<Bath> bath = metal.flatMap(m -> new BathChoice(folder).bath(design, m));
+        Optional<BathChoice.Chosen> bath = metal.flatMap(m -> baths.bath(design, m));
         Supply supply = supply(design);
         Optional<Members> bench = design.object(
                 "bench",
@@ -87,7 +94,8 @@ final class DesignReader {
                 piece.orElseThrow(),
                 holding,
                 bands,
-                bath.orElseThrow(),
+                bath.orElseThrow().bath(),
+                bath.orElseThrow().file(),
                 supply,
                 vessel,
                 times,
@@ -113,7 +121,7 @@ final class DesignReader {
         Optional<Members> found = design.object("holding", List.of("ends_down", "dry_mm"));
         Set<End> ends = found.map(this::endsDown).orElse(Holding.USUAL.endsDown());
         double dryMm = found.isPresent()
-                ? found.get().number("dry_mm", 0, PieceReader.LONGEST_MM).orElse(Holding.USUAL.dryMm())
+                ? found.get().number("dry_mm", Limits.DRY_MM).orElse(Holding.USUAL.dryMm())
                 : Holding.USUAL.dryMm();
         if (piece.isPresent() && !(dryMm < piece.get().lengthMm())) {
             faults.add(
@@ -146,8 +154,8 @@ final class DesignReader {
             return Supply.USUAL;
         }
         Members supply = found.get();
-        double maxVolts = supply.number("max_volts", 1, 1000).orElse(Supply.USUAL.maxVolts());
-        double dialVolts = supply.number("dial_volts", 0.001, 10).orElse(Supply.USUAL.dialVolts());
+        double maxVolts = supply.number("max_volts", Limits.SUPPLY_VOLTS).orElse(Supply.USUAL.maxVolts());
+        double dialVolts = supply.number("dial_volts", Limits.DIAL_VOLTS).orElse(Supply.USUAL.dialVolts());
         if (dialVolts > maxVolts) {
             supply.fault(
                     "dial_volts",
@@ -156,24 +164,24 @@ final class DesignReader {
         }
         return new Supply(
                 maxVolts,
-                supply.number("max_amps", 0.001, 1000).orElse(Supply.USUAL.maxAmps()),
+                supply.number("max_amps", Limits.SUPPLY_AMPS).orElse(Supply.USUAL.maxAmps()),
                 dialVolts,
-                supply.number("slew_volts_per_s", 0.001, 1e6).orElse(Supply.USUAL.slewVoltsPerS()));
+                supply.number("slew_volts_per_s", Limits.SLEW_VOLTS_PER_S).orElse(Supply.USUAL.slewVoltsPerS()));
     }
 
     private static BenchTimes times(Members bench) {
         return new BenchTimes(
-                bench.number("immersion_min", 0, MOST_MINUTES).orElse(BenchTimes.USUAL.immersionMin()),
-                bench.number("mask_min", 0, MOST_MINUTES).orElse(BenchTimes.USUAL.maskMin()),
-                bench.number("mask_over_min", 0, MOST_MINUTES).orElse(BenchTimes.USUAL.maskOverMin()),
-                bench.number("strip_min", 0, MOST_MINUTES).orElse(BenchTimes.USUAL.stripMin()),
-                bench.number("turn_min", 0, MOST_MINUTES).orElse(BenchTimes.USUAL.turnMin()));
+                bench.number("immersion_min", Limits.BENCH_MIN).orElse(BenchTimes.USUAL.immersionMin()),
+                bench.number("mask_min", Limits.BENCH_MIN).orElse(BenchTimes.USUAL.maskMin()),
+                bench.number("mask_over_min", Limits.BENCH_MIN).orElse(BenchTimes.USUAL.maskOverMin()),
+                bench.number("strip_min", Limits.BENCH_MIN).orElse(BenchTimes.USUAL.stripMin()),
+                bench.number("turn_min", Limits.BENCH_MIN).orElse(BenchTimes.USUAL.turnMin()));
     }
 
     private static PullSettings pull(Members design, Optional<Members> bench) {
         PullSettings usual = PullSettings.USUAL;
         double holdS =
-                bench.isPresent() ? bench.get().number("hold_s", 1, 36_000).orElse(usual.holdS()) : usual.holdS();
+                bench.isPresent() ? bench.get().number("hold_s", Limits.HOLD_S).orElse(usual.holdS()) : usual.holdS();
         Optional<Members> found = design.object("pull", List.of("fade", "step_dE00", "slowest_mm_s", "fastest_mm_s"));
         if (found.isEmpty()) {
             return new PullSettings(
@@ -182,9 +190,9 @@ final class DesignReader {
         Members pull = found.get();
         FadeStyle fade =
                 pull.word("fade", List.of(FadeStyle.values()), FadeStyle::key).orElse(usual.fade());
-        double stepDe00 = pull.number("step_dE00", 0.2, 50).orElse(usual.stepDe00());
-        double slowestMmPerS = pull.number("slowest_mm_s", 0.001, 1000).orElse(usual.slowestMmPerS());
-        double fastestMmPerS = pull.number("fastest_mm_s", 0.001, 1000).orElse(usual.fastestMmPerS());
+        double stepDe00 = pull.number("step_dE00", Limits.STEP_DE00).orElse(usual.stepDe00());
+        double slowestMmPerS = pull.number("slowest_mm_s", Limits.HAND_MM_PER_S).orElse(usual.slowestMmPerS());
+        double fastestMmPerS = pull.number("fastest_mm_s", Limits.HAND_MM_PER_S).orElse(usual.fastestMmPerS());
         if (!(slowestMmPerS < fastestMmPerS)) {
             String key = pull.has("slowest_mm_s") ? "slowest_mm_s" : "fastest_mm_s";
             pull.fault(

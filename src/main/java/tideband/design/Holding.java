@@ -5,6 +5,8 @@ import java.util.EnumSet;
 import java.util.Set;
 import tideband.piece.End;
 import tideband.piece.Piece;
+import tideband.piece.Section;
+import tideband.piece.Vessel;
 
 /**
  * How the piece is held.
@@ -25,6 +27,7 @@ public record Holding(Set<End> endsDown, double dryMm) {
         if (!(dryMm >= 0 && Double.isFinite(dryMm))) {
             throw new IllegalArgumentException("dryMm must be finite and at least 0, but was " + dryMm);
         }
+        dryMm += 0.0; // minus zero becomes zero
         endsDown = Collections.unmodifiableSet(EnumSet.copyOf(endsDown));
     }
 
@@ -43,5 +46,24 @@ public record Holding(Set<End> endsDown, double dryMm) {
             largest = Math.max(largest, here);
         }
         return largest;
+    }
+
+    /**
+     * Whether the piece, so held, goes into a vessel upright.
+     *
+     * @param vessel the vessel
+     * @param piece a piece longer than {@link #dryMm}
+     * @return whether what can get wet is smaller across than the vessel's inside
+     */
+    public boolean goesInto(Vessel vessel, Piece piece) {
+        double sizeMm = largestWetSizeMm(piece);
+        if (!(piece.section() instanceof Section.Flat flat)) {
+            return sizeMm < vessel.narrowMm();
+        }
+        double thickMm = Math.min(sizeMm, flat.thicknessMm());
+        double broadMm = Math.max(sizeMm, flat.thicknessMm());
+        return vessel instanceof Vessel.Round round
+                ? Math.hypot(thickMm, broadMm) < round.boreMm()
+                : thickMm < vessel.narrowMm() && broadMm < vessel.wideMm();
     }
 }

@@ -16,12 +16,13 @@ import java.util.regex.Pattern;
 final class Members {
 
     /** What a title, a name or the like may be: 1 to 80 characters on one line, not only spaces. */
-    static final Pattern LINE_OF_TEXT = Pattern.compile("^(?=.*[^ ])[^\\p{Cc}\\p{Cs}\\u2028\\u2029]{1,80}$");
+    static final Pattern LINE_OF_TEXT =
+            Pattern.compile("^(?=.*[^ ])[^\\p{Cc}\\p{Cs}\\u2028\\u2029]{1," + Limits.LONGEST_LINE + "}$");
 
     /** What a longer text may be: up to 1000 characters, on one line too. */
     static final Pattern PARAGRAPH = Pattern.compile("^[^\\p{Cc}\\p{Cs}\\u2028\\u2029]{0,1000}$");
 
-    private static final int VERSION = 1;
+    static final int VERSION = 1;
 
     private final JsonNode object;
     private final String pointer;
@@ -73,6 +74,16 @@ final class Members {
         }
     }
 
+    /** Whether a tree is a file of another kind, which its format says; then that is all there is to say about it. */
+    static boolean isOther(JsonNode root, String format, Faults faults, String wrong, String right) {
+        JsonNode given = root.path("format");
+        if (!given.isTextual() || !given.textValue().equals(format)) {
+            return false;
+        }
+        faults.add("/format", "is " + Shown.quoted(format) + ": " + wrong, right);
+        return true;
+    }
+
     /** Checks the two members every file begins with. */
     void checkFormat(String format) {
         word("format", List.of(format), Function.identity());
@@ -90,6 +101,14 @@ final class Members {
 
     OptionalDouble number(String key, double low, double high) {
         return has(key) ? number(object.get(key), pointer(key), low, high) : OptionalDouble.empty();
+    }
+
+    OptionalDouble number(String key, Range range) {
+        return number(key, range.low(), range.high());
+    }
+
+    OptionalDouble number(JsonNode node, String at, Range range) {
+        return number(node, at, range.low(), range.high());
     }
 
     /** An element of an array, or any other value, that must be a number. */

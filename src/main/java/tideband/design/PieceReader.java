@@ -13,12 +13,6 @@ import tideband.piece.Vessel;
 /** Reads the piece and the vessel of a design. */
 final class PieceReader {
 
-    static final double LONGEST_MM = 5000;
-    private static final double THINNEST_MM = 0.05;
-    private static final double WIDEST_MM = 1000;
-    private static final double WIDEST_VESSEL_MM = 10_000;
-    private static final int MOST_STATIONS = 200;
-
     private enum Shape {
         ROUND("round"),
         FLAT("flat"),
@@ -70,8 +64,8 @@ final class PieceReader {
 
     private Optional<Section> section(Members piece) {
         Optional<Shape> shape = piece.word("shape", List.of(Shape.values()), Shape::key);
-        OptionalDouble thicknessMm = piece.number("thickness_mm", THINNEST_MM, WIDEST_MM);
-        OptionalDouble boreMm = piece.number("bore_mm", THINNEST_MM, WIDEST_MM);
+        OptionalDouble thicknessMm = piece.number("thickness_mm", Limits.SIZE_MM);
+        OptionalDouble boreMm = piece.number("bore_mm", Limits.SIZE_MM);
         if (shape.isEmpty()) {
             return Optional.empty();
         }
@@ -97,7 +91,8 @@ final class PieceReader {
     }
 
     private Optional<List<Station>> stations(Members piece) {
-        Optional<List<JsonNode>> elements = piece.array("stations", 2, MOST_STATIONS);
+        Optional<List<JsonNode>> elements =
+                piece.array("stations", (int) Limits.STATIONS.low(), (int) Limits.STATIONS.high());
         if (elements.isEmpty()) {
             return Optional.empty();
         }
@@ -111,8 +106,8 @@ final class PieceReader {
             }
             Members station = found.get();
             station.require("at_mm", "size_mm");
-            OptionalDouble atMm = station.number("at_mm", 0, LONGEST_MM);
-            OptionalDouble sizeMm = station.number("size_mm", THINNEST_MM, WIDEST_MM);
+            OptionalDouble atMm = station.number("at_mm", Limits.AT_MM);
+            OptionalDouble sizeMm = station.number("size_mm", Limits.SIZE_MM);
             if (atMm.isPresent()) {
                 boolean fits = checkPosition(station, i, beforeMm, atMm.getAsDouble());
                 beforeMm = atMm.getAsDouble();
@@ -125,7 +120,7 @@ final class PieceReader {
             return Optional.empty();
         }
         double lengthMm = stations.get(stations.size() - 1).atMm();
-        if (lengthMm < 1) {
+        if (lengthMm < Limits.LENGTH_MM.low()) {
             faults.add(
                     piece.pointer("stations") + "/" + (stations.size() - 1) + "/at_mm",
                     "makes the piece " + Shown.number(lengthMm) + " mm long",
@@ -158,9 +153,9 @@ final class PieceReader {
             return Optional.empty();
         }
         Members vessel = found.get();
-        OptionalDouble boreMm = vessel.number("bore_mm", 1, WIDEST_VESSEL_MM);
-        OptionalDouble widthMm = vessel.number("width_mm", 1, WIDEST_VESSEL_MM);
-        OptionalDouble lengthMm = vessel.number("length_mm", 1, WIDEST_VESSEL_MM);
+        OptionalDouble boreMm = vessel.number("bore_mm", Limits.VESSEL_MM);
+        OptionalDouble widthMm = vessel.number("width_mm", Limits.VESSEL_MM);
+        OptionalDouble lengthMm = vessel.number("length_mm", Limits.VESSEL_MM);
         boolean rectangular = vessel.has("width_mm") || vessel.has("length_mm");
         if (vessel.has("bore_mm") == rectangular) {
             faults.add(
@@ -169,43 +164,25 @@ final class PieceReader {
                     "give either \"bore_mm\", or \"width_mm\" and \"length_mm\"");
             return Optional.empty();
         }
+        Optional<Vessel> made = Optional.empty();
         if (rectangular) {
             vessel.require("width_mm", "length_mm");
-            if (widthMm.isEmpty() || lengthMm.isEmpty()) {
-                return Optional.empty();
+            if (widthMm.isPresent() && lengthMm.isPresent()) {
+                made = Optional.of(Vessel.rectangular(widthMm.getAsDouble(), lengthMm.getAsDouble()));
             }
-            double narrowMm = Math.min(widthMm.getAsDouble(), lengthMm.getAsDouble());
-            double wideMm = Math.max(widthMm.getAsDouble(), lengthMm.getAsDouble());
-            checkFit(design, piece, holding, narrowMm, wideMm, Double.POSITIVE_INFINITY);
-            return Optional.of(Vessel.rectangular(narrowMm, wideMm));
+        } else if (boreMm.isPresent()) {
+            made = Optional.of(Vessel.round(boreMm.getAsDouble()));
         }
-        if (boreMm.isEmpty()) {
-            return Optional.empty();
-        }
-        double acrossMm = boreMm.getAsDouble();
-        checkFit(design, piece, holding, acrossMm, acrossMm, acrossMm);
-        return Optional.of(Vessel.round(acrossMm));
-    }
-
-    private void checkFit(
-            Members design, Optional<Piece> piece, Holding holding, double narrowMm, double wideMm, double diagonalMm) {
-        if (piece.isEmpty() || !(holding.dryMm() < piece.get().lengthMm())) {
-            return;
-        }
-        double sizeMm = holding.largestWetSizeMm(piece.get());
-        boolean fits;
-        if (piece.get().section() instanceof Section.Flat flat) {
-            double thickMm = Math.min(sizeMm, flat.thicknessMm());
-            double broadMm = Math.max(sizeMm, flat.thicknessMm());
-            fits = thickMm < narrowMm && broadMm < wideMm && Math.hypot(thickMm, broadMm) < diagonalMm;
-        } else {
-            fits = sizeMm < narrowMm;
-        }
-        if (!fits) {
+        if (made.isPresent()
+                && piece.isPresent()
+                && holding.dryMm() < piece.get().lengthMm()
+                && !holding.goesInto(made.get(), piece.get())) {
             faults.add(
                     design.pointer("vessel"),
-                    "is too narrow: where the piece gets wet it is up to " + Shown.number(sizeMm) + " mm across",
+                    "is too narrow: where the piece gets wet it is up to "
+                            + Shown.number(holding.largestWetSizeMm(piece.get())) + " mm across",
                     "take a larger vessel; sizes are measured inside");
         }
+        return made;
     }
 }

@@ -28,4 +28,14 @@ public record PullSettings(double holdS, FadeStyle fade, double stepDe00, double
                             + slowestMmPerS + " and " + fastestMmPerS);
         }
     }
+
+    /**
+     * The same settings with another hold.
+     *
+     * @param seconds seconds a level is held, 1 to 36000
+     * @return the changed settings
+     */
+    public PullSettings withHoldS(double seconds) {
+        return new PullSettings(seconds, fade, stepDe00, slowestMmPerS, fastestMmPerS);
+    }
 }

@@ -62,7 +62,7 @@ class BathFileTest {
                 "\"a\\nb\"      | /source         | is \"a\\u000ab\"        | at most 1000 characters",
                 "\"\"           | /name           | is \"\"                 | 1 to 80 characters",
                 "1              | /nm_per_volts   | is not a known key      | did you mean \"nm_per_volt\"?",
-                "\"tideband-design\" | /format    | is \"tideband-design\"  | it must be \"tideband-bath\"",
+                "\"tideband-design\" | /format    | is \"tideband-design\": this is a design, not a bath | \"format\": \"tideband-bath\"",
                 "1.5            | /version        | is 1.5                  | it must be 1",
             })
     void oneFault(String value, String pointer, String wrong, String right) {

@@ -78,7 +78,7 @@ class DesignFileTest {
         assertThat(design.light()).isEqualTo(Illuminant.LED_B3);
         assertThat(design.observer()).isEqualTo(Observer.CIE_1964_10_DEGREE);
         assertThat(design.piece().section()).isEqualTo(new Section.Flat(0.8));
-        assertThat(design.vessel()).contains(new Vessel(6000));
+        assertThat(design.vessel()).contains(Vessel.rectangular(30, 200));
         assertThat(design.holding()).isEqualTo(new Holding(EnumSet.of(End.B), 5));
         assertThat(design.bands())
                 .containsExactly(

@@ -6,6 +6,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.io.InputStream;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
@@ -13,6 +14,7 @@ import java.util.TreeSet;
 import java.util.function.Function;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
+import tideband.oxide.Bath;
 
 /**
  * Property: schema and reader say the same. The schema's tree is walked along sound files, and at every place its keys,
@@ -26,6 +28,21 @@ class SchemaTest {
     void readerOfDesignsKeepsToTheSchema() throws IOException {
         check(new Kind(
                 "tideband-design.schema.json", List.of(Samples.HOOK, Samples.SHUTTER, Samples.PIPE), Samples::faults));
+    }
+
+    @Test
+    void whatIsWrittenKeepsToTheSchema() throws IOException {
+        check(new Kind(
+                "tideband-design.schema.json",
+                Stream.of(Samples.HOOK, Samples.SHUTTER, Samples.PIPE)
+                        .map(text -> new String(DesignFile.bytes(Samples.sound(text)), StandardCharsets.UTF_8))
+                        .toList(),
+                Samples::faults));
+        Bath bath = ((Reading.Read<Bath>) BathFile.read(Samples.bytes(Samples.BATH))).value();
+        check(new Kind(
+                "tideband-bath.schema.json",
+                List.of(new String(BathFile.bytes(bath), StandardCharsets.UTF_8)),
+                json -> Samples.faults(BathFile.read(Samples.bytes(json)))));
     }
 
     @Test
@@ -164,8 +181,7 @@ class SchemaTest {
 
         private void tryText(JsonNode schema, String pointer) {
             assertThat(faultsAt(pointer, "7")).hasSize(1);
-            assertThat(Stream.of(
-                            Members.LINE_OF_TEXT, Members.PARAGRAPH, BathChoice.PLAIN_NAME, BandsReader.HEX_COLOUR))
+            assertThat(Stream.of(Members.LINE_OF_TEXT, Members.PARAGRAPH, BathChoice.PLAIN_NAME, Wanted.Colour.HEX))
                     .anyMatch(pattern ->
                             pattern.pattern().equals(schema.get("pattern").textValue()));
             assertThat(faultsAt(pointer, "\"\\u0007\"")).hasSize(1);

@@ -94,8 +94,8 @@ class WaterlineTest {
                 .withMessageContaining("take a larger vessel");
         assertThatIllegalArgumentException().isThrownBy(() -> tight.travelMm(HOOK, End.B, 1, 0));
         assertThatIllegalArgumentException()
-                .isThrownBy(() -> new Vessel(Double.NaN))
-                .withMessage("areaMm2 must be finite and above 0, but was NaN");
-        assertThatIllegalArgumentException().isThrownBy(() -> new Vessel(0));
+                .isThrownBy(() -> Vessel.round(Double.NaN))
+                .withMessage("boreMm must be finite and above 0, but was NaN");
+        assertThatIllegalArgumentException().isThrownBy(() -> Vessel.round(0));
     }
 }

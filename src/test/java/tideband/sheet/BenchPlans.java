@@ -99,7 +99,7 @@ final class BenchPlans {
                 bathName,
                 plan,
                 List.of(fadePull(110, 42, 46, 150, 12), hold(50, 46)),
-                Optional.of(new Vessel(1963.5)));
+                Optional.of(Vessel.round(50)));
     }
 
     /** A tube in two tones with crisp edges and a bare middle. */
