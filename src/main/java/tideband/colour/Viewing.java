@@ -5,6 +5,10 @@ package tideband.colour;
  * {@link SpectralGrid}, normalised so that the perfect reflector has {@code Y = 100}.
  */
 public final class Viewing {
+    /** Halvings of the chroma when it is lowered; 2⁻⁴⁰ of it is far below what a display can step. */
+    private static final int HALVINGS = 40;
+    /** A lightness may stray from 0 to 100 by this much through rounding and still counts as inside. */
+    private static final double ROUNDING = 1e-9;
 
     private final Illuminant illuminant;
     private final Observer observer;
@@ -169,6 +173,37 @@ public final class Viewing {
      */
     public Srgb srgb(Xyz colour) {
         return Srgb.of(toScreenWhite.times(colour));
+    }
+
+    /**
+     * How a screen shows a CIELAB colour seen in this light. Adaptation mixes the channels, so that a very strong colour could
+     * come out lighter than white or darker than black; its chroma is lowered until it does not.
+     *
+     * @param colour L* from 0 to 100, a*, b* against this light's white
+     * @return the screen colour
+     */
+    public Srgb srgb(Lab colour) {
+        if (showable(colour)) {
+            return srgb(colour.toXyz(white));
+        }
+        double low = 0;
+        double high = 1;
+        for (int i = 0; i < HALVINGS; i++) {
+            double middle = (low + high) / 2;
+            if (showable(colour.withChromaTimes(middle))) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        Srgb nearest = srgb(colour.withChromaTimes(low).toXyz(white));
+        return new Srgb(nearest.red(), nearest.green(), nearest.blue(), false);
+    }
+
+    private boolean showable(Lab colour) {
+        double lightness =
+                Lab.of(toScreenWhite.times(colour.toXyz(white)), Srgb.WHITE).lightness();
+        return lightness >= -ROUNDING && lightness <= 100 + ROUNDING;
     }
 
     @Override

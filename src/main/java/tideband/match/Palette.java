@@ -51,10 +51,14 @@ public final class Palette {
      * @param maxNm thickest film in nm, above 0 to {@link #MOST_NM}
      */
     public Palette(FilmSystem system, Finish finish, Viewing viewing, double angleDegrees, double maxNm) {
+        this(new Surface(system, finish, angleDegrees), viewing, maxNm);
+    }
+
+    private Palette(Surface surface, Viewing viewing, double maxNm) {
         if (!(maxNm > 0 && maxNm <= MOST_NM)) {
             throw new IllegalArgumentException("maxNm must be above 0 to " + MOST_NM + " nm, but was " + maxNm);
         }
-        this.surface = new Surface(system, finish, angleDegrees);
+        this.surface = surface;
         this.viewing = viewing;
         this.maxNm = maxNm;
         // Two films beyond the last, so that a cubic fits around every place.
@@ -66,6 +70,16 @@ public final class Palette {
         List<Lab> colours = films.stream().map(viewing::lab).toList();
         orders = new Orders(STEP_NM, colours);
         bare = colours.get(0);
+    }
+
+    /**
+     * The same films seen from another side.
+     *
+     * @param angleDegrees viewing angle from the normal in degrees, 0 to 85
+     * @return the palette at that angle
+     */
+    public Palette seenAt(double angleDegrees) {
+        return new Palette(surface.seenAt(angleDegrees), viewing, maxNm);
     }
 
     /**
@@ -130,6 +144,18 @@ public final class Palette {
     public int orderAt(double filmNm) {
         requireWithin(filmNm);
         return orders.at(filmNm);
+    }
+
+    /**
+     * The name of a film's colour, read from the table: as {@link #at} names it, but for a film within 1e-5 dE00 of where one
+     * name ends and the next begins.
+     *
+     * @param filmNm film thickness in nm, 0 to {@link #maxNm()}
+     * @return the name
+     * @throws IllegalArgumentException for a film outside the palette
+     */
+    public TradeName nameAt(double filmNm) {
+        return name(filmNm, labAt(filmNm));
     }
 
     private void requireWithin(double filmNm) {

@@ -29,6 +29,7 @@ public final class Surface {
     private static final int TILTS = 7;
     private static final int FILMS = 7;
 
+    private final FilmSystem system;
     private final Finish finish;
     private final List<Facet> facets;
 
@@ -44,8 +45,19 @@ public final class Surface {
             throw new IllegalArgumentException("viewing angle must be from 0 to " + MAX_ANGLE_DEGREES
                     + " degrees from the normal, but was " + angleDegrees);
         }
+        this.system = system;
         this.finish = finish;
         this.facets = facets(system, finish, angleDegrees, TILTS, FILMS);
+    }
+
+    /**
+     * The same surface seen from another side.
+     *
+     * @param angleDegrees viewing angle from the normal in degrees, 0 to 85
+     * @return the surface at that angle
+     */
+    public Surface seenAt(double angleDegrees) {
+        return new Surface(system, finish, angleDegrees);
     }
 
     /** The facets that stand for a finish, by a chosen number of points. */

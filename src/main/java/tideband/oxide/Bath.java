@@ -35,6 +35,7 @@ public record Bath(
         requireBetween("resistanceOhm", resistanceOhm, 0, 10_000);
         requireBetween("ceilingVolts", ceilingVolts, 1, 500);
         requireBetween("indexScale", indexScale, 0.5, 1.5);
+        resistanceOhm += 0.0; // minus zero becomes zero
     }
 
     private static void requireBetween(String name, double value, double low, double high) {
