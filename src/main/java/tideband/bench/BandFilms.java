@@ -37,82 +37,96 @@ final class BandFilms {
 
     List<DrawnBand> find() {
         List<DrawnBand> drawn = new ArrayList<>();
-        for (Band band : design.bands()) {
-            drawn.add(find(band));
+        for (int i = 0; i < design.bands().size(); i++) {
+            drawn.add(find(i));
         }
         return drawn;
     }
 
-    private DrawnBand find(Band band) {
+    private DrawnBand find(int index) {
+        Band band = design.bands().get(index);
         if (band.wanted() instanceof Wanted.Film film) {
-            checkReach(band, film.aSideNm());
+            checkReach(index, film, film.aSideNm());
             if (film.bSideNm() != film.aSideNm()) {
-                checkReach(band, film.bSideNm());
+                checkReach(index, film, film.bSideNm());
             }
             return new DrawnBand(band, film.aSideNm(), film.bSideNm(), Optional.empty(), 0);
         }
         if (band.wanted() instanceof Wanted.Volts volts) {
-            checkReach(band, volts);
+            checkReach(index, volts);
             double within = Math.min(volts.volts(), colours.scale().ceilingVolts());
             double filmNm = rounded(colours.scale().filmNmAtVolts().applyAsDouble(within));
             return new DrawnBand(band, filmNm, filmNm, Optional.empty(), 0);
         }
         if (band.wanted() instanceof Wanted.Colour colour) {
-            return matched(band, colour);
+            return matched(index, colour);
         }
         return new DrawnBand(band, 0, 0, Optional.empty(), 0);
     }
 
-    private DrawnBand matched(Band band, Wanted.Colour wanted) {
+    private DrawnBand matched(int index, Wanted.Colour wanted) {
+        Band band = design.bands().get(index);
         double ofAllNm =
                 colourMatch.nearestFilmNm(wanted.lab(), OptionalInt.empty()).orElseThrow();
         OptionalDouble asAskedNm = colourMatch.nearestFilmNm(wanted.lab(), wanted.order());
         if (asAskedNm.isEmpty()) {
-            obstacles.add(new Obstacle(
-                    where(band),
+            int order = colours.palette().orderAt(ofAllNm);
+            stop(
+                    index,
                     text(
                             "no film of order %d comes near %s within %.1f nm, all that bath and supply give",
                             wanted.order().orElseThrow(), wanted.text(), mostNm),
                     text(
                             "draw it in order %d, which has the nearest film (%.1f nm), or leave the order out",
-                            colours.palette().orderAt(ofAllNm), ofAllNm)));
+                            order, ofAllNm),
+                    Optional.of(new Mends(design).inOrder(index, wanted, order)));
         }
         double filmNm = Math.max(leastNm, rounded(asAskedNm.orElse(ofAllNm)));
         double difference = Ciede2000.between(wanted.lab(), colours.palette().labAt(filmNm));
         return new DrawnBand(band, filmNm, filmNm, Optional.of(wanted.lab()), difference);
     }
 
-    private void checkReach(Band band, Wanted.Volts wanted) {
+    private void checkReach(int band, Wanted.Volts wanted) {
         double mostVolts = colours.scale().ceilingVolts();
         double leastVolts = design.supply().dialVolts();
         if (wanted.volts() > mostVolts) {
-            obstacles.add(new Obstacle(
-                    where(band),
+            stop(
+                    band,
                     text("%.1f V is more than bath and supply allow (%.1f V)", wanted.volts(), mostVolts),
-                    text("draw it at %.1f V or less", mostVolts)));
+                    text("draw it at %.1f V or less", mostVolts),
+                    Optional.of(new Mends(design).atVolts(band, mostVolts)).filter(mend -> mostVolts >= leastVolts));
         } else if (wanted.volts() < leastVolts) {
-            obstacles.add(new Obstacle(
-                    where(band),
+            stop(
+                    band,
                     text("%.3f V is less than one step of the supply's dial (%.3f V)", wanted.volts(), leastVolts),
-                    text("draw it at %.3f V or more, or bare", leastVolts)));
+                    text("draw it at %.3f V or more, or bare", leastVolts),
+                    Optional.of(new Mends(design).atVolts(band, leastVolts)).filter(mend -> leastVolts <= mostVolts));
         }
     }
 
-    private void checkReach(Band band, double filmNm) {
+    private void checkReach(int band, Wanted.Film film, double filmNm) {
+        double floorNm = Math.floor(mostNm * 10) / 10;
+        double ceilNm = Math.ceil(leastNm * 10) / 10;
         if (filmNm > mostNm) {
-            obstacles.add(new Obstacle(
-                    where(band),
+            stop(
+                    band,
                     tooThick(filmNm),
-                    text("draw it at %.1f nm or less, or %s", Math.floor(mostNm * 10) / 10, otherCure(filmNm))));
+                    text("draw it at %.1f nm or less, or %s", floorNm, otherCure(filmNm)),
+                    floorNm >= leastNm ? Optional.of(new Mends(design).thinner(band, floorNm)) : Optional.empty());
         } else if (filmNm < leastNm) {
-            obstacles.add(new Obstacle(
-                    where(band),
+            stop(
+                    band,
                     text(
                             "a film of %.1f nm is too thin: the metal has %.1f nm from the beginning, and the thinnest this"
                                     + " supply can add to it makes %.1f nm",
                             filmNm, design.bath().nativeNm(), leastNm),
-                    text("draw it at %.1f nm or more, or bare", Math.ceil(leastNm * 10) / 10)));
+                    text("draw it at %.1f nm or more, or bare", ceilNm),
+                    ceilNm <= mostNm ? Optional.of(new Mends(design).thicker(band, film, ceilNm)) : Optional.empty());
         }
+    }
+
+    private void stop(int band, String reason, String change, Optional<Mend> mend) {
+        obstacles.add(new Obstacle(where(design.bands().get(band)), reason, change, OptionalInt.of(band), mend));
     }
 
     private String tooThick(double filmNm) {

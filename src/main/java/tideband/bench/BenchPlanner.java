@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.function.BiFunction;
 import java.util.function.BooleanSupplier;
 import java.util.function.Consumer;
@@ -12,7 +14,9 @@ import tideband.design.Band;
 import tideband.design.Design;
 import tideband.design.Edge;
 import tideband.match.FilmColour;
+import tideband.plan.Hindrance;
 import tideband.plan.Immersion;
+import tideband.plan.KnownBound;
 import tideband.plan.Outcome;
 import tideband.plan.Plan;
 import tideband.plan.Planner;
@@ -23,6 +27,7 @@ import tideband.pull.Outfit;
 import tideband.pull.Pull;
 import tideband.pull.PullOutcome;
 import tideband.pull.PullPlanner;
+import tideband.pull.Shortfall;
 import tideband.pull.Target;
 import tideband.trial.Dip;
 import tideband.trial.Trial;
@@ -35,8 +40,12 @@ import tideband.trial.Wish;
  * <p>Data flows one way, and each stage sees only what the one before it gave.
  */
 public final class BenchPlanner {
+    /** Up to so many bands a plan takes a few milliseconds, and every change of a pull can be tried; beyond, the first. */
+    private static final int QUICK_BANDS = 12;
+
     private final Design design;
     private final Colours colours;
+    private final KnownBound known;
 
     /**
      * A planner for one design.
@@ -45,6 +54,18 @@ public final class BenchPlanner {
      * @param colours its colours; see {@link Colours#of}
      */
     public BenchPlanner(Design design, Colours colours) {
+        this(design, colours, new KnownBound());
+    }
+
+    /**
+     * A planner for one design of many, as while it is being drawn.
+     *
+     * @param design the design
+     * @param colours its colours; see {@link Colours#of}
+     * @param known what is kept from one design to the next; it makes the work quicker, never another
+     */
+    public BenchPlanner(Design design, Colours colours, KnownBound known) {
+        this.known = known;
         this.design = design;
         this.colours = colours;
     }
@@ -70,7 +91,7 @@ public final class BenchPlanner {
      * @return how it is made, or why it can't be
      */
     public Work work(Consumer<String> progress, BooleanSupplier cancelled) {
-        return work(Planner::plan, progress, cancelled);
+        return work((problem, stop) -> Planner.plan(problem, stop, known), progress, cancelled);
     }
 
     /**
@@ -82,7 +103,7 @@ public final class BenchPlanner {
      * @return how it is made, or why it can't be
      */
     public Work workWhileDrawing(BooleanSupplier cancelled) {
-        return work(Planner::planThisOrderOnly, stage -> {}, cancelled);
+        return work((problem, stop) -> Planner.planThisOrderOnly(problem, stop, known), stage -> {}, cancelled);
     }
 
     private Work work(
@@ -96,28 +117,19 @@ public final class BenchPlanner {
             return new Work.CannotBeMade(films.obstacles());
         }
         progress.accept("planning immersions and masks");
-        return carryOn(planner.apply(problem(drawn), cancelled), drawn, progress);
+        return carryOn(planner.apply(problem(drawn), cancelled), drawn, progress, cancelled);
     }
 
-    private Work carryOn(Outcome outcome, List<DrawnBand> drawn, Consumer<String> progress) {
+    private Work carryOn(Outcome outcome, List<DrawnBand> drawn, Consumer<String> progress, BooleanSupplier cancelled) {
         if (outcome instanceof Outcome.Impossible impossible) {
-            return new Work.CannotBeMade(impossible.hindrances().stream()
-                    .map(h -> new Obstacle(
-                            h.band().isPresent()
-                                    ? BandFilms.where(
-                                            design.bands().get(h.band().getAsInt()))
-                                    : "the design",
-                            h.reason(),
-                            h.remedy()))
-                    .toList());
+            return new Work.CannotBeMade(
+                    impossible.hindrances().stream().map(this::obstacle).toList());
         }
         Plan plan = ((Outcome.Planned) outcome).plan();
         progress.accept("working out the pulls");
         PullOutcome pulled = new PullPlanner(outfit(), targets(drawn), plan.immersions()).plan();
         if (pulled instanceof PullOutcome.OutOfReach outOfReach) {
-            return new Work.CannotBeMade(outOfReach.shortfalls().stream()
-                    .map(s -> new Obstacle(BandFilms.where(design.bands().get(s.band())), s.reason(), s.change()))
-                    .toList());
+            return new Work.CannotBeMade(obstacles(outOfReach.shortfalls(), cancelled));
         }
         PullOutcome.Pulled pulls = (PullOutcome.Pulled) pulled;
         progress.accept("trying the plan on paper");
@@ -131,6 +143,45 @@ public final class BenchPlanner {
         List<Caution> cautions = new ArrayList<>(Cautions.of(design, plan, pulls.pulls()));
         cautions.addAll(Cautions.ofColours(bands));
         return new Work.Worked(new BenchPlan(design, bands, plan, pulls.pulls(), trial, cautions));
+    }
+
+    private Obstacle obstacle(Hindrance hindrance) {
+        OptionalInt band = hindrance.band();
+        return new Obstacle(
+                band.isPresent() ? BandFilms.where(design.bands().get(band.getAsInt())) : "the design",
+                hindrance.reason(),
+                hindrance.remedy(),
+                band,
+                new Mends(design).held(hindrance.changes()));
+    }
+
+    private List<Obstacle> obstacles(List<Shortfall> shortfalls, BooleanSupplier cancelled) {
+        ShortfallMend finder = new ShortfallMend(
+                design,
+                (changed, band) ->
+                        new BenchPlanner(changed, colours.fittedTo(design, changed)).standsInTheWay(band, cancelled));
+        int mended = design.bands().size() <= QUICK_BANDS ? shortfalls.size() : 1;
+        List<Obstacle> obstacles = new ArrayList<>();
+        for (Shortfall s : shortfalls) {
+            obstacles.add(new Obstacle(
+                    BandFilms.where(design.bands().get(s.band())),
+                    s.reason(),
+                    s.change(),
+                    OptionalInt.of(s.band()),
+                    obstacles.size() < mended ? finder.of(s) : Optional.empty()));
+        }
+        return obstacles;
+    }
+
+    /** Whether a band still falls short in this design, or the design does not even come to its pulls. */
+    private boolean standsInTheWay(int band, BooleanSupplier cancelled) {
+        BandFilms films = new BandFilms(design, colours);
+        List<DrawnBand> drawn = films.find();
+        return !films.obstacles().isEmpty()
+                || !(Planner.planThisOrderOnly(problem(drawn), cancelled) instanceof Outcome.Planned planned)
+                || (new PullPlanner(outfit(), targets(drawn), planned.plan().immersions()).plan()
+                                instanceof PullOutcome.OutOfReach outOfReach
+                        && outOfReach.shortfalls().stream().anyMatch(s -> s.band() == band));
     }
 
     private Problem problem(List<DrawnBand> drawn) {

@@ -1,7 +1,9 @@
 package tideband.bench;
 
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.OptionalInt;
 import tideband.colour.Lab;
 import tideband.colour.Viewing;
 import tideband.design.Design;
@@ -63,18 +65,66 @@ public record Colours(Palette palette, VoltScale scale, Viewing viewing) {
                         scale.ceilingNm(),
                         scale.ceilingVolts(),
                         (Palette.MOST_NM - MARGIN_NM) / MARGIN),
-                "take a bath of less film a volt or of a lower ceiling, or a supply of fewer volts"));
+                "take a bath of less film a volt or of a lower ceiling, or a supply of fewer volts",
+                OptionalInt.empty(),
+                fewerVolts(design)));
+    }
+
+    /** The supply kept, but turned no higher than colours are known for. */
+    private static Optional<Mend> fewerVolts(Design design) {
+        double volts = coupon(design).volts((Palette.MOST_NM - MARGIN_NM) / MARGIN);
+        double dialVolts = design.supply().dialVolts();
+        for (double most = design.supply().highestVolts(volts);
+                most > 0;
+                most = design.supply().highestVolts(most - dialVolts)) {
+            Mend mend = new Mends(design).atMostVolts(most);
+            if (reachNm(scale(mend.design())) <= Palette.MOST_NM) {
+                return Optional.of(mend);
+            }
+        }
+        return Optional.empty();
+    }
+
+    /** These colours for a changed design: the palette is kept where it still holds, for it is costly. */
+    Colours fittedTo(Design before, Design changed) {
+        boolean same = before.metal() == changed.metal()
+                && before.finish() == changed.finish()
+                && before.light() == changed.light()
+                && before.observer() == changed.observer()
+                && before.bath().equals(changed.bath());
+        VoltScale changedScale = scale(changed);
+        return same && changedScale.ceilingNm() * MARGIN <= palette.maxNm()
+                ? new Colours(palette, changedScale, viewing)
+                : of(changed);
     }
 
     private static VoltScale scale(Design design) {
-        Coupon coupon = new Coupon(
-                design.bath(), design.supply().maxAmps(), design.pull().holdS(), Coupon.USUAL_CM2);
+        Coupon coupon = coupon(design);
         double mostVolts = design.supply().highestVolts(design.bath().ceilingVolts());
         return new VoltScale(mostVolts, coupon::filmNm, coupon::volts);
     }
 
+    private static Coupon coupon(Design design) {
+        return new Coupon(
+                design.bath(), design.supply().maxAmps(), design.pull().holdS(), Coupon.USUAL_CM2);
+    }
+
     private static double reachNm(VoltScale scale) {
         return scale.ceilingNm() * MARGIN + MARGIN_NM;
+    }
+
+    /**
+     * The films of a design's bands as they are drawn, whether or not they are within reach: colours matched, volts turned
+     * into films.
+     *
+     * @param design a design these colours are good for
+     * @return one a band, from end A to end B
+     */
+    public List<DrawnFilm> filmsOf(Design design) {
+        return new BandFilms(design, this)
+                .find().stream()
+                        .map(drawn -> new DrawnFilm(drawn.aSideNm(), drawn.bSideNm()))
+                        .toList();
     }
 
     /**
@@ -94,6 +144,6 @@ public record Colours(Palette palette, VoltScale scale, Viewing viewing) {
      * @return {@code #rrggbb}, mapped into the gamut of sRGB
      */
     public String hexOf(Lab lab) {
-        return viewing.srgb(lab.toXyz(viewing.white())).hex();
+        return viewing.srgb(lab).hex();
     }
 }

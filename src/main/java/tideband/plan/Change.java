@@ -1,6 +1,8 @@
 package tideband.plan;
 
+import java.util.ArrayList;
 import java.util.EnumSet;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
@@ -13,6 +15,21 @@ import tideband.piece.End;
  * @param dryMm the longest dry length that works, in mm
  */
 public record Change(Optional<End> alsoDown, OptionalDouble dryMm) {
+
+    /** Dry lengths are told to a thousandth of a mm. */
+    static final int DRY_DIGITS = 3;
+
+    /**
+     * The change in words.
+     *
+     * @return such as {@code let end B go down too and shorten the dry length to 4 mm}
+     */
+    public String words() {
+        List<String> words = new ArrayList<>();
+        alsoDown.ifPresent(end -> words.add("let end " + end + " go down too"));
+        dryMm.ifPresent(mm -> words.add("shorten the dry length to " + Wording.number(mm, DRY_DIGITS) + " mm"));
+        return String.join(" and ", words);
+    }
 
     /**
      * Makes the change.

@@ -18,9 +18,6 @@ import tideband.piece.End;
  */
 final class Hindrances {
 
-    /** Dry lengths are advised to a thousandth of a mm, rounded down. */
-    private static final int DRY_DIGITS = 3;
-
     private Hindrances() {}
 
     static List<Hindrance> of(Problem problem) {
@@ -45,7 +42,7 @@ final class Hindrances {
         }
         if (Needs.dry(problem, band, end)) {
             double inMm = problem.dryMm() - Needs.clearMm(problem, band, end);
-            faults.add("it reaches " + Wording.number(inMm, DRY_DIGITS)
+            faults.add("it reaches " + Wording.number(inMm, Change.DRY_DIGITS)
                     + " mm into the dry length under the holder at end " + end.other());
         }
         return faults;
@@ -61,7 +58,7 @@ final class Hindrances {
         }
         String reason = problem.nameOf(band) + " cannot be finished: " + String.join(", and ", reasons);
         List<Change> changes = changes(problem, band);
-        List<String> words = changes.stream().map(Hindrances::words).toList();
+        List<String> words = changes.stream().map(Change::words).toList();
         return new Hindrance(
                 OptionalInt.of(band), reason, words.stream().distinct().collect(Collectors.joining(", or ")), changes);
     }
@@ -88,15 +85,10 @@ final class Hindrances {
         return (change.alsoDown().isPresent() ? 1 : 0) + (change.dryMm().isPresent() ? 1 : 0);
     }
 
-    private static String words(Change change) {
-        List<String> words = new ArrayList<>();
-        change.alsoDown().ifPresent(end -> words.add("let end " + end + " go down too"));
-        change.dryMm()
-                .ifPresent(mm -> words.add("shorten the dry length to " + Wording.number(mm, DRY_DIGITS) + " mm"));
-        return String.join(" and ", words);
-    }
-
+    /** Rounded down, so that what is advised works. */
     private static double roundedDown(double mm) {
-        return BigDecimal.valueOf(mm).setScale(DRY_DIGITS, RoundingMode.FLOOR).doubleValue();
+        return BigDecimal.valueOf(mm)
+                .setScale(Change.DRY_DIGITS, RoundingMode.FLOOR)
+                .doubleValue();
     }
 }

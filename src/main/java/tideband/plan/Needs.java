@@ -1,5 +1,6 @@
 package tideband.plan;
 
+import java.util.Arrays;
 import java.util.List;
 import tideband.design.Order;
 import tideband.piece.End;
@@ -100,6 +101,16 @@ final class Needs {
     /** Whether a band reaches into the dry length with an end down. */
     static boolean dry(Problem problem, int band, End end) {
         return problem.dryMm() > clearMm(problem, band, end) + EDGE_SLACK_MM;
+    }
+
+    /** Whether the same ends may go down and each band needs the same others masked; films and lengths may differ. */
+    boolean asksTheSameMasksAs(Needs other) {
+        return bands == other.bands
+                && filmed == other.filmed
+                && Arrays.equals(mayGoDown, other.mayGoDown)
+                && Arrays.equals(finishable, other.finishable)
+                && Arrays.deepEquals(inner, other.inner)
+                && Arrays.deepEquals(crisp, other.crisp);
     }
 
     int bands() {

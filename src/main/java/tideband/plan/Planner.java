@@ -44,8 +44,9 @@ public final class Planner {
     private final Tariff tariff;
     private final long[] lengthSteps;
     private final BooleanSupplier cancelled;
+    private final KnownBound known;
 
-    private Planner(Problem problem, boolean bothOrders, BooleanSupplier cancelled) {
+    private Planner(Problem problem, boolean bothOrders, BooleanSupplier cancelled, KnownBound known) {
         this.problem = problem;
         this.bothOrders = bothOrders;
         this.needs = new Needs(problem);
@@ -54,6 +55,7 @@ public final class Planner {
                 .mapToLong(s -> Math.round(s.lengthMm() / Draft.LENGTH_STEP_MM))
                 .toArray();
         this.cancelled = cancelled;
+        this.known = known;
     }
 
     /**
@@ -75,7 +77,20 @@ public final class Planner {
      * @throws CancellationException if it was stopped
      */
     public static Outcome plan(Problem problem, BooleanSupplier cancelled) {
-        return plan(problem, true, cancelled);
+        return plan(problem, cancelled, new KnownBound());
+    }
+
+    /**
+     * Plans, can be stopped, and goes on from what is known from the problem before.
+     *
+     * @param problem the drawing and how it is held
+     * @param cancelled asked now and then, every few milliseconds; planning stops when it says true
+     * @param known the bound last found; it makes the answer quicker, never another
+     * @return the plan, or why there is none
+     * @throws CancellationException if it was stopped
+     */
+    public static Outcome plan(Problem problem, BooleanSupplier cancelled, KnownBound known) {
+        return plan(problem, true, cancelled, known);
     }
 
     /**
@@ -88,13 +103,26 @@ public final class Planner {
      * @throws CancellationException if it was stopped
      */
     public static Outcome planThisOrderOnly(Problem problem, BooleanSupplier cancelled) {
-        return plan(problem, false, cancelled);
+        return planThisOrderOnly(problem, cancelled, new KnownBound());
     }
 
-    private static Outcome plan(Problem problem, boolean bothOrders, BooleanSupplier cancelled) {
+    /**
+     * The same, going on from what is known from the problem before.
+     *
+     * @param problem the drawing and how it is held
+     * @param cancelled asked now and then, every few milliseconds; planning stops when it says true
+     * @param known the bound last found; it makes the answer quicker, never another
+     * @return the same plan as {@link #plan(Problem)} but for {@link Plan#savedByOtherOrderMin}, or why there is none
+     * @throws CancellationException if it was stopped
+     */
+    public static Outcome planThisOrderOnly(Problem problem, BooleanSupplier cancelled, KnownBound known) {
+        return plan(problem, false, cancelled, known);
+    }
+
+    private static Outcome plan(Problem problem, boolean bothOrders, BooleanSupplier cancelled, KnownBound known) {
         List<Hindrance> hindrances = Hindrances.of(problem);
         return hindrances.isEmpty()
-                ? new Outcome.Planned(new Planner(problem, bothOrders, cancelled).solve())
+                ? new Outcome.Planned(new Planner(problem, bothOrders, cancelled, known).solve())
                 : new Outcome.Impossible(hindrances);
     }
 
@@ -112,7 +140,7 @@ public final class Planner {
     /** The least plan, and what the other order would save. */
     private Plan exactly(PlanWriter writer) {
         int size = Math.max(1, needs.bands() - UNSTEERED_BANDS);
-        Bound bound = Bound.ofSelections(needs, tariff, size);
+        Bound bound = known.ofSelections(needs, tariff, size);
         Draft good = good(bound, problem.order(), FEW_BEGINNINGS);
         Draft best = least(bound, good, problem.order(), Long.MAX_VALUE).draft();
         OptionalDouble saved = OptionalDouble.empty();
@@ -127,7 +155,7 @@ public final class Planner {
 
     /** The least plan if it is found within the work allowed, else a good one and a bound. */
     private Plan perhapsExactly(PlanWriter writer) {
-        Bound bound = Bound.ofSelections(needs, tariff, STEERING_BANDS);
+        Bound bound = known.ofSelections(needs, tariff, STEERING_BANDS);
         Draft good = good(bound, problem.order(), MANY_BEGINNINGS);
         Found found = least(bound, good, problem.order(), MOST_WORK);
         return writer.write(found.draft(), found.bound(), OptionalDouble.empty());
@@ -177,22 +205,22 @@ public final class Planner {
      * least price is much quicker than up to that of the plan known, so limits are raised from the bound by small steps
      * until a plan keeps to one. A limit that no plan keeps to is a bound itself.
      */
-    private Found least(Bound bound, Draft known, Order order, long work) {
+    private Found least(Bound bound, Draft good, Order order, long work) {
         ExactSearch search = new ExactSearch(needs, tariff, order, bound, work, cancelled);
-        long step = 1 + known.price() / LIMIT_STEPS;
-        long proven = Math.min(known.price(), bound.start());
+        long step = 1 + good.price() / LIMIT_STEPS;
+        long proven = Math.min(good.price(), bound.start());
         while (true) {
-            long limit = Math.min(known.price(), proven + step);
+            long limit = Math.min(good.price(), proven + step);
             ExactSearch.Layer[] layers = search.layers(limit);
             if (search.exhausted()) {
-                return new Found(known, proven);
+                return new Found(good, proven);
             }
             if (layers[layers.length - 1] != null) {
                 Draft least = draft(new TieBreak(search, tariff, layers, lengthSteps).visits(), order);
                 return new Found(least, least.price());
             }
-            if (limit == known.price()) {
-                throw new IllegalStateException("the search missed a plan it was given: " + known);
+            if (limit == good.price()) {
+                throw new IllegalStateException("the search missed a plan it was given: " + good);
             }
             proven = limit + 1;
         }

@@ -3,6 +3,7 @@ package tideband.pull;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
+import java.util.List;
 import java.util.Locale;
 import tideband.oxide.Coupon;
 
@@ -35,17 +36,20 @@ final class HoldShortfall {
         double neededS = before.secondsUntil(aimNm, LONGEST_HOLD_S);
         // At the limit film grows by charge: as much more current as the film wants more time.
         double neededAmps = limitAmps * Math.max(neededS / holdS, aimNm / reachedNm);
+        double wholeS = Math.ceil(neededS * outfit.settings().holdS() / holdS);
+        Cure amps = new Cure.Amps(twoDigits(neededAmps, RoundingMode.UP).doubleValue());
+        boolean holdHelps = neededS < LONGEST_HOLD_S;
         return new Shortfall(
                 before.band(),
                 text(
                         "the supply's %s A are not enough: at %s V for %s s the film gets to %s nm of %s nm",
                         plain(limitAmps, RoundingMode.HALF_UP), outfit.mostVolts(), holdS, reachedNm, aimNm),
-                neededS < LONGEST_HOLD_S
+                holdHelps
                         ? text(
                                 "hold for about %s s, or use a supply of at least %s A",
-                                Math.ceil(neededS * outfit.settings().holdS() / holdS),
-                                plain(neededAmps, RoundingMode.UP))
-                        : text("use a supply of at least %s A", plain(neededAmps, RoundingMode.UP)));
+                                wholeS, plain(neededAmps, RoundingMode.UP))
+                        : text("use a supply of at least %s A", plain(neededAmps, RoundingMode.UP)),
+                holdHelps && wholeS <= LONGEST_HOLD_S ? List.of(new Cure.Hold(wholeS), amps) : List.of(amps));
     }
 
     private Shortfall fewVolts(int band, double aimNm, double holdS, double reachedNm) {
@@ -57,16 +61,21 @@ final class HoldShortfall {
         String reason = text(
                 "%s nm needs about %s V in this bath, more than %s, which gives %s nm in %s s",
                 aimNm, neededVolts, limit, reachedNm, holdS);
-        String change = text("draw it at %s nm or less", Math.floor(reachedNm * 10) / 10)
+        double mostNm = Math.floor(reachedNm * 10) / 10;
+        String change = text("draw it at %s nm or less", mostNm)
                 + (bathLimits
                         ? ", or use a bath with a higher ceiling or ratio"
                         : text(", or use a supply of at least %s V", Math.ceil(neededVolts)));
-        return new Shortfall(band, reason, change);
+        return new Shortfall(band, reason, change, List.of(new Cure.Film(mostNm)));
     }
 
     /** Amps in two digits. */
     private static String plain(double amps, RoundingMode rounding) {
-        return new BigDecimal(amps).round(new MathContext(2, rounding)).toPlainString();
+        return twoDigits(amps, rounding).toPlainString();
+    }
+
+    private static BigDecimal twoDigits(double amps, RoundingMode rounding) {
+        return new BigDecimal(amps).round(new MathContext(2, rounding));
     }
 
     private static String text(String form, Object... values) {

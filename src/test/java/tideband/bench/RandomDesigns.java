@@ -38,7 +38,7 @@ import tideband.piece.Station;
 import tideband.piece.Vessel;
 
 /** Designs drawn by lot: the same number always gives the same design. */
-final class RandomDesigns {
+public final class RandomDesigns {
     private static final double THICKEST_NM = 600;
 
     private final Map<Metal, Map<Finish, Palette>> palettes = new EnumMap<>(Metal.class);
@@ -69,8 +69,13 @@ final class RandomDesigns {
         return new BenchPlanner(design, colours(design)).work(stage -> {}, () -> false);
     }
 
-    /** A design with a supply and a bath that can make most drawings; every twelfth has twelve bands. */
-    static Design design(int number) {
+    /**
+     * A design with a supply and a bath that can make most drawings; every twelfth has twelve bands.
+     *
+     * @param number which design
+     * @return the design
+     */
+    public static Design design(int number) {
         return new Lot(new Random(1000L + number)).design(number);
     }
 

@@ -17,6 +17,7 @@ import org.openjdk.jmh.annotations.Warmup;
 import tideband.design.Design;
 import tideband.design.DesignFile;
 import tideband.design.Reading;
+import tideband.plan.KnownBound;
 
 /**
  * How long a drawing of twelve bands takes from design to trial, as after every move of a hand that draws: films matched,
@@ -59,6 +60,7 @@ public class RecomputeBenchmark {
     @Param({"ramped", "fixed-volts", "stepped"})
     String fade;
 
+    private final KnownBound known = new KnownBound();
     private Design design;
     private Colours colours;
 
@@ -91,6 +93,16 @@ public class RecomputeBenchmark {
     @Benchmark
     public Work whileDrawing() {
         return new BenchPlanner(design, colours).workWhileDrawing(() -> false);
+    }
+
+    /**
+     * The same again and again, as while a hand draws: the bound found once is kept.
+     *
+     * @return what comes of it
+     */
+    @Benchmark
+    public Work whileDrawingOn() {
+        return new BenchPlanner(design, colours, known).workWhileDrawing(() -> false);
     }
 
     /**
