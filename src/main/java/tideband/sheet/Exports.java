@@ -9,6 +9,9 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.concurrent.CancellationException;
+import java.util.function.BooleanSupplier;
+import java.util.function.Consumer;
 import tideband.bench.BenchPlan;
 import tideband.bench.Colours;
 
@@ -19,6 +22,11 @@ import tideband.bench.Colours;
  * whole file at a time. If anything fails, the temporary files go and files that were replaced come back.
  */
 public final class Exports {
+    private static final String PREVIEW = "-preview.svg";
+    private static final String TIMING = "-timing.csv";
+    private static final String PLAN = "-plan.json";
+    private static final String PIXELS = "-preview.png";
+
     private Exports() {}
 
     /**
@@ -36,23 +44,112 @@ public final class Exports {
      */
     public static List<Path> write(BenchPlan plan, Colours colours, Path directory, String name, boolean png)
             throws IOException {
-        if (name.isBlank() || name.chars().anyMatch(c -> c == '/' || c == '\\' || c == ':' || c < ' ')) {
+        return write(plan, colours, directory, name, png, stage -> {}, () -> false);
+    }
+
+    /**
+     * Writes the same files as {@link #write(BenchPlan, Colours, Path, String, boolean)}, telling how it goes.
+     *
+     * @param plan the plan
+     * @param colours the colours of films for the plan's design
+     * @param directory where to write; made if it is missing
+     * @param name what the names begin with
+     * @param png whether to draw the PNG too, which needs a Java with fonts
+     * @param progress told in a few words what is being done: {@link #stages} times
+     * @param cancelled asked at every stage whether to give up; giving up throws {@link CancellationException} and leaves
+     *     everything as it was
+     * @return the files written, in the order of {@link #names}
+     * @throws IllegalArgumentException if the name is empty or holds a path separator
+     * @throws IOException if a file cannot be written or the PNG cannot be drawn; nothing has then changed
+     */
+    public static List<Path> write(
+            BenchPlan plan,
+            Colours colours,
+            Path directory,
+            String name,
+            boolean png,
+            Consumer<String> progress,
+            BooleanSupplier cancelled)
+            throws IOException {
+        if (!canName(name)) {
             throw new IllegalArgumentException(
                     "name must be the beginning of a file name, without / \\ or :, but was '" + name + "'");
         }
+        Consumer<String> stage = what -> {
+            progress.accept(what);
+            if (cancelled.getAsBoolean()) {
+                throw new CancellationException("given up while " + what);
+            }
+        };
         Map<String, byte[]> files = new LinkedHashMap<>();
+        stage.accept("drawing the preview");
         byte[] preview = PreviewSvg.bytes(plan, colours);
-        files.put(name + "-preview.svg", preview);
+        files.put(name + PREVIEW, preview);
         for (Paper paper : Paper.values()) {
-            files.put(name + "-steps-" + paper.key() + ".pdf", StepSheetPdf.bytes(plan, colours, paper));
+            stage.accept("drawing the step sheet for " + paper.key() + " paper");
+            files.put(name + steps(paper), StepSheetPdf.bytes(plan, colours, paper));
         }
-        files.put(name + "-timing.csv", TimingCsv.bytes(plan, colours));
-        files.put(name + "-plan.json", PlanJson.bytes(plan));
+        stage.accept("listing the pulls and the plan");
+        files.put(name + TIMING, TimingCsv.bytes(plan, colours));
+        files.put(name + PLAN, PlanJson.bytes(plan));
         if (png) {
-            files.put(name + "-preview.png", PreviewPng.bytes(preview));
+            stage.accept("drawing the preview in pixels");
+            files.put(name + PIXELS, PreviewPng.bytes(preview));
         }
+        stage.accept("writing the files");
         Files.createDirectories(directory);
         return place(directory, files);
+    }
+
+    /**
+     * Whether file names can begin so.
+     *
+     * @param name what the names are to begin with
+     * @return false if it is blank or holds what separates the parts of a path
+     */
+    public static boolean canName(String name) {
+        return !name.isBlank() && name.chars().noneMatch(c -> c == '/' || c == '\\' || c == ':' || c < ' ');
+    }
+
+    /**
+     * The names of the files that writing gives.
+     *
+     * @param name what they begin with
+     * @param png whether the PNG is among them
+     * @return the names, in the order they are written
+     */
+    public static List<String> names(String name, boolean png) {
+        List<String> names = new ArrayList<>();
+        names.add(name + PREVIEW);
+        for (Paper paper : Paper.values()) {
+            names.add(name + steps(paper));
+        }
+        names.add(name + TIMING);
+        names.add(name + PLAN);
+        if (png) {
+            names.add(name + PIXELS);
+        }
+        return names;
+    }
+
+    /**
+     * How many stages writing has.
+     *
+     * @param png whether the PNG is drawn too
+     * @return the number of times progress is told
+     */
+    public static int stages(boolean png) {
+        return Paper.values().length + (png ? 4 : 3);
+    }
+
+    /**
+     * What the name of a step sheet ends with.
+     *
+     * @param paper the paper it is for
+     * @return such as {@code -steps-a4.pdf}
+     */
+    public static String steps(Paper paper) {
+        return "-steps-" + paper.key() + ".pdf";
     }
 
     /**

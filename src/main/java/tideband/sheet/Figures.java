@@ -47,13 +47,24 @@ public final class Figures {
         return rounded(value, decimals).setScale(decimals).toPlainString();
     }
 
-    /** Volts as finely as the supply's dial has them, and with one decimal at least. */
-    static String volts(double volts, Supply supply) {
+    /**
+     * Volts as finely as the supply's dial has them, and with one decimal at least.
+     *
+     * @param volts any finite number of volts
+     * @param supply the supply with the dial
+     * @return its figures, without a unit
+     */
+    public static String volts(double volts, Supply supply) {
         return fixed(volts, Math.max(1, rounded(supply.dialVolts(), 3).scale()));
     }
 
-    /** Seconds as a clock shows them, to the nearest second: 75.2 is 1:15. */
-    static String clock(double seconds) {
+    /**
+     * Seconds as a clock shows them, to the nearest second: 75.2 is 1:15.
+     *
+     * @param seconds seconds, at least 0
+     * @return minutes and seconds
+     */
+    public static String clock(double seconds) {
         long whole = Math.round(seconds);
         long rest = whole % 60;
         return whole / 60 + (rest < 10 ? ":0" : ":") + rest;

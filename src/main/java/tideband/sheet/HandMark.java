@@ -16,10 +16,16 @@ import tideband.pull.Row;
  * @param act what to do, in a few words to be read from afar
  * @param leadsTo where that leads until the next mark; may be empty
  */
-record HandMark(int number, Row row, String act, String leadsTo) {
+public record HandMark(int number, Row row, String act, String leadsTo) {
 
-    /** The marks of a pull, in order. */
-    static List<HandMark> of(Pull pull, Supply supply) {
+    /**
+     * The marks of a pull, in order.
+     *
+     * @param pull the pull
+     * @param supply the supply, whose dial says how finely volts are told
+     * @return one mark for each moment at which something is to be done; the last is the end of the pull
+     */
+    public static List<HandMark> of(Pull pull, Supply supply) {
         List<Row> rows = pull.rows();
         List<HandMark> marks = new ArrayList<>();
         for (int first = 0; first < rows.size(); ) {
@@ -36,13 +42,22 @@ record HandMark(int number, Row row, String act, String leadsTo) {
         return marks;
     }
 
-    /** Both parts as one sentence without its full stop. */
-    String sentence() {
+    /**
+     * Both parts as one sentence without its full stop.
+     *
+     * @return what to do and where that leads
+     */
+    public String sentence() {
         return leadsTo.isEmpty() ? act : act + ", " + leadsTo;
     }
 
-    /** The volts to set, {@code off}, or in brackets what the meter shows while the current limit holds it down. */
-    String volts(Supply supply) {
+    /**
+     * The volts to set, {@code off}, or in brackets what the meter shows while the current limit holds it down.
+     *
+     * @param supply the supply, whose dial says how finely volts are told
+     * @return the words for them, without a unit
+     */
+    public String volts(Supply supply) {
         if (row.volts() == 0) {
             return "off";
         }
