@@ -20,6 +20,7 @@ import picocli.CommandLine.ScopeType;
             ""
         },
         subcommands = {
+            DrawCommand.class,
             PlanCommand.class,
             ColoursCommand.class,
             MatchCommand.class,
@@ -36,6 +37,7 @@ import picocli.CommandLine.ScopeType;
         footer = {
             "",
             "A lantern maker's morning, with the designs that come with the program:",
+            "  tideband draw designs/lantern-hook.json                 draw it, and see what becomes of it",
             "  tideband colours --metal titanium --to 160              what films show",
             "  tideband match --metal titanium --colour '#3a3f8f'      films near a colour, and their volts",
             "  tideband plan designs/lantern-hook.json                 the plan, to read",

@@ -23,7 +23,8 @@ class HelpTest {
     /** Reference: the contract's list of commands, as far as they are there; nothing is listed that is not. */
     @Test
     void theCommands() {
-        assertThat(program().getSubcommands().keySet()).containsExactly("plan", "colours", "match", "grow", "trial");
+        assertThat(program().getSubcommands().keySet())
+                .containsExactly("draw", "plan", "colours", "match", "grow", "trial");
     }
 
     /** Reference: the contract's options; ours besides them are listed here too, so that none comes in unseen. */

@@ -23,7 +23,7 @@ class WrongUseTest {
             delimiter = '|',
             value = {
                 "colour | Did you mean",
-                "draw | Unmatched argument",
+                "draw one.json two.json | Unmatched argument",
                 "colours | Missing required option: '--metal=METAL'",
                 "colours --metal zinc | 'zinc' is none of titanium, ti-6al-4v, niobium, tantalum",
                 "colours --metal Titanium | 'Titanium' is none of",
