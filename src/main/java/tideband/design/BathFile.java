@@ -116,13 +116,13 @@ public final class BathFile {
         bath.checkFormat(FORMAT);
         Optional<String> name = bath.line("name");
         Optional<Metal> metal = bath.word("metal", List.of(Metal.values()), Metal::key);
-        OptionalDouble nmPerVolt = bath.number("nm_per_volt", 0.1, 20);
-        OptionalDouble fieldSlope = bath.number("field_slope", 5, 200);
-        OptionalDouble nativeNm = bath.number("native_nm", 0.1, 20);
-        OptionalDouble efficiency = bath.number("efficiency", 0.01, 1);
-        OptionalDouble resistanceOhm = bath.number("resistance_ohm", 0, 10_000);
-        OptionalDouble ceilingVolts = bath.number("ceiling_volts", 1, 500);
-        OptionalDouble indexScale = bath.number("index_scale", 0.5, 1.5);
+        OptionalDouble nmPerVolt = bath.number("nm_per_volt", Limits.BATH_NM_PER_VOLT);
+        OptionalDouble fieldSlope = bath.number("field_slope", Limits.BATH_FIELD_SLOPE);
+        OptionalDouble nativeNm = bath.number("native_nm", Limits.BATH_NATIVE_NM);
+        OptionalDouble efficiency = bath.number("efficiency", Limits.BATH_EFFICIENCY);
+        OptionalDouble resistanceOhm = bath.number("resistance_ohm", Limits.BATH_RESISTANCE_OHM);
+        OptionalDouble ceilingVolts = bath.number("ceiling_volts", Limits.BATH_CEILING_VOLTS);
+        OptionalDouble indexScale = bath.number("index_scale", Limits.BATH_INDEX_SCALE);
         Optional<String> source = bath.paragraph("source");
         return faults.orElse(() -> new Bath(
                 name.orElseThrow(),

@@ -41,6 +41,20 @@ public final class Limits {
     public static final Range SLEW_VOLTS_PER_S = new Range(0.001, 1e6);
     /** What an act at the bench costs in minutes. */
     public static final Range BENCH_MIN = new Range(0, 1e6);
+    /** Anodizing ratio of a bath, in nm/V. */
+    public static final Range BATH_NM_PER_VOLT = new Range(0.1, 20);
+    /** Field slope of a bath. */
+    public static final Range BATH_FIELD_SLOPE = new Range(5, 200);
+    /** Native film a bath starts from, in nm. */
+    public static final Range BATH_NATIVE_NM = new Range(0.1, 20);
+    /** Current efficiency of a bath. */
+    public static final Range BATH_EFFICIENCY = new Range(0.01, 1);
+    /** Resistance of a bath, in ohm. */
+    public static final Range BATH_RESISTANCE_OHM = new Range(0, 10_000);
+    /** Ceiling of a bath, in V. */
+    public static final Range BATH_CEILING_VOLTS = new Range(1, 500);
+    /** Factor of a bath on the index of its oxide. */
+    public static final Range BATH_INDEX_SCALE = new Range(0.5, 1.5);
     /** Seconds a level is held. */
     public static final Range HOLD_S = new Range(1, 36_000);
     /** CIEDE2000 difference between neighbouring steps of a stepped fade. */

@@ -49,7 +49,7 @@ public final class BandEdits {
         List<Band> bands = new ArrayList<>(design.bands());
         bands.set(edge, new Band(before.name(), before.fromMm(), atMm, before.wanted(), before.edge()));
         bands.set(edge + 1, new Band(after.name(), atMm, after.toMm(), after.wanted(), after.edge()));
-        return withBands(design, bands);
+        return design.withBands(bands);
     }
 
     /**
@@ -80,7 +80,7 @@ public final class BandEdits {
             bands.add(new Band(band.name(), startMm, endMm, band.wanted(), band.edge()));
             startMm = endMm;
         }
-        return withBands(design, bands);
+        return design.withBands(bands);
     }
 
     /**
@@ -166,7 +166,7 @@ public final class BandEdits {
         List<Band> bands = new ArrayList<>(design.bands());
         bands.set(band, new Band(old.name(), old.fromMm(), cutMm, first, Edge.SOFT));
         bands.add(band + 1, new Band(Line.fresh(old.name(), names(design)), cutMm, old.toMm(), second, old.edge()));
-        return withBands(design, bands);
+        return design.withBands(bands);
     }
 
     /**
@@ -193,7 +193,7 @@ public final class BandEdits {
         List<Band> bands = new ArrayList<>(design.bands().subList(0, first));
         bands.add(new Band(head.name(), head.fromMm(), tail.toMm(), wanted, tail.edge()));
         bands.addAll(design.bands().subList(last + 1, design.bands().size()));
-        return withBands(design, bands);
+        return design.withBands(bands);
     }
 
     /**
@@ -216,7 +216,7 @@ public final class BandEdits {
         List<Band> bands = new ArrayList<>(design.bands());
         bands.set(after, new Band(old.name(), old.fromMm(), middleMm, old.wanted(), Edge.SOFT));
         bands.add(after + 1, new Band(Line.fresh("band", names(design)), middleMm, old.toMm(), allowed, old.edge()));
-        return withBands(design, bands);
+        return design.withBands(bands);
     }
 
     /**
@@ -298,26 +298,13 @@ public final class BandEdits {
                 headMm = band.toMm();
             }
         }
-        return left.isEmpty() ? design : withBands(design, left);
-    }
-
-    /**
-     * The same design with other bands.
-     *
-     * @param design the design
-     * @param bands bands that cover the piece
-     * @return the changed design
-     */
-    public static Design withBands(Design design, List<Band> bands) {
-        Draft draft = new Draft(design);
-        draft.bands = bands;
-        return draft.design();
+        return left.isEmpty() ? design : design.withBands(left);
     }
 
     /** Lays bands out from end A; the design itself if the piece is too short for them. */
     private static Design laid(Design design, List<Stretch> stretches) {
         return Layout.laid(stretches, design.piece().lengthMm())
-                .map(bands -> withBands(design, bands))
+                .map(bands -> design.withBands(bands))
                 .orElse(design);
     }
 
@@ -326,7 +313,7 @@ public final class BandEdits {
         for (int i : chosen) {
             bands.set(i, edit.apply(bands.get(i)));
         }
-        return withBands(design, bands);
+        return design.withBands(bands);
     }
 
     private static Set<String> names(Design design) {

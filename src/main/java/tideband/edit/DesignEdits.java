@@ -265,9 +265,7 @@ public final class DesignEdits {
      * @return the changed design
      */
     public static Design order(Design design, Order order) {
-        Draft draft = new Draft(design);
-        draft.order = order;
-        return draft.design();
+        return design.withOrder(order);
     }
 
     /**

@@ -70,7 +70,7 @@ public final class DrawingWindow {
             CompletableFuture<Beginning> first, Optional<Path> design, CompletableFuture<Void> closed) {
         try {
             Stage stage = new Stage();
-            TidebandApplication program = new TidebandApplication();
+            WindowRun program = new WindowRun();
             stage.addEventHandler(WindowEvent.WINDOW_HIDDEN, event -> end(program, closed));
             program.start(stage, first.join(), design);
         } catch (RuntimeException | Error fault) {
@@ -79,7 +79,7 @@ public final class DrawingWindow {
         }
     }
 
-    private static void end(TidebandApplication program, CompletableFuture<Void> closed) {
+    private static void end(WindowRun program, CompletableFuture<Void> closed) {
         try {
             program.stop();
             closed.complete(null);

@@ -4,10 +4,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.function.Supplier;
-import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
-import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 
@@ -16,14 +14,11 @@ import javafx.collections.ObservableList;
  *
  * @param <T> the kind of thing
  */
-public final class ChoiceSetting<T> implements Setting {
-    private final About about;
-    private final Terms terms;
+public final class ChoiceSetting<T> extends Setting {
     private final Supplier<List<Choice<T>>> offered;
     private final Supplier<Optional<T>> usual;
     private final Supplier<Optional<T>> value;
     private final Function<T, String> set;
-    private final State state = new State();
     private final ObservableList<Choice<T>> choices = FXCollections.observableArrayList();
     // Kept, as it would hear nothing once collected.
     private final ObservableList<Choice<T>> offeredNow = FXCollections.unmodifiableObservableList(choices);
@@ -46,8 +41,7 @@ public final class ChoiceSetting<T> implements Setting {
             Supplier<Optional<T>> usual,
             Supplier<Optional<T>> value,
             Function<T, String> set) {
-        this.about = about;
-        this.terms = terms;
+        super(about, terms);
         this.offered = offered;
         this.usual = usual;
         this.value = value;
@@ -80,70 +74,40 @@ public final class ChoiceSetting<T> implements Setting {
      * @return whether it was accepted
      */
     public boolean choose(T thing) {
-        String fault = state.lock.get().isEmpty() ? set.apply(thing) : state.lock.get();
+        String reason = lock.get().isEmpty() ? set.apply(thing) : lock.get();
         refresh();
-        state.fault.set(fault);
-        return fault.isEmpty();
+        fault.set(reason);
+        return reason.isEmpty();
     }
 
     @Override
     public void backToUsual() {
-        if (state.unusual.get()) {
+        if (unusual.get()) {
             choose(usual.get().orElseThrow());
         }
     }
 
     @Override
     public void refresh() {
-        state.keepTo(terms);
-        List<Choice<T>> now = state.placed.get() ? offered.get() : List.of();
+        keepToTerms();
+        List<Choice<T>> now = placed.get() ? offered.get() : List.of();
         if (!choices.equals(now)) {
             choices.setAll(now);
         }
-        Optional<T> thing = state.placed.get() ? value.get() : Optional.empty();
+        Optional<T> thing = placed.get() ? value.get() : Optional.empty();
         Optional<Choice<T>> one = now.stream()
                 .filter(c -> thing.filter(c.value()::equals).isPresent())
                 .findFirst();
         if (!chosen.get().equals(one)) {
             chosen.set(one);
-            state.fault.set("");
+            fault.set("");
         }
         Optional<T> plain = usual.get();
-        state.unusual.set(plain.isPresent() && thing.isPresent() && !plain.equals(thing));
-        state.bounds.set(now.stream()
+        unusual.set(plain.isPresent() && thing.isPresent() && !plain.equals(thing));
+        limits.set(now.stream()
                 .filter(c -> plain.filter(c.value()::equals).isPresent())
                 .findFirst()
                 .map(c -> "Usual: " + c.name())
                 .orElse(""));
-    }
-
-    @Override
-    public About about() {
-        return about;
-    }
-
-    @Override
-    public ReadOnlyBooleanProperty placedProperty() {
-        return state.placed.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty lockProperty() {
-        return state.lock.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty boundsProperty() {
-        return state.bounds.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty faultProperty() {
-        return state.fault.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyBooleanProperty unusualProperty() {
-        return state.unusual.getReadOnlyProperty();
     }
 }

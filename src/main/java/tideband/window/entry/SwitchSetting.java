@@ -4,16 +4,12 @@ import java.util.function.BooleanSupplier;
 import java.util.function.Consumer;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
-import javafx.beans.property.ReadOnlyStringProperty;
 
 /** Something that is on or off. */
-public final class SwitchSetting implements Setting {
-    private final About about;
-    private final Terms terms;
+public final class SwitchSetting extends Setting {
     private final boolean usual;
     private final BooleanSupplier value;
     private final Consumer<Boolean> set;
-    private final State state = new State();
     private final ReadOnlyBooleanWrapper on = new ReadOnlyBooleanWrapper();
 
     /**
@@ -26,8 +22,7 @@ public final class SwitchSetting implements Setting {
      * @param set switches it
      */
     public SwitchSetting(About about, Terms terms, boolean usual, BooleanSupplier value, Consumer<Boolean> set) {
-        this.about = about;
-        this.terms = terms;
+        super(about, terms);
         this.usual = usual;
         this.value = value;
         this.set = set;
@@ -49,7 +44,7 @@ public final class SwitchSetting implements Setting {
      * @param to whether it is to be on
      */
     public void turn(boolean to) {
-        if (state.lock.get().isEmpty() && to != on.get()) {
+        if (lock.get().isEmpty() && to != on.get()) {
             set.accept(to);
         }
         refresh();
@@ -62,39 +57,9 @@ public final class SwitchSetting implements Setting {
 
     @Override
     public void refresh() {
-        state.keepTo(terms);
+        keepToTerms();
         on.set(value.getAsBoolean());
-        state.unusual.set(on.get() != usual);
-        state.bounds.set(usual ? "Usually on" : "Usually off");
-    }
-
-    @Override
-    public About about() {
-        return about;
-    }
-
-    @Override
-    public ReadOnlyBooleanProperty placedProperty() {
-        return state.placed.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty lockProperty() {
-        return state.lock.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty boundsProperty() {
-        return state.bounds.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty faultProperty() {
-        return state.fault.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyBooleanProperty unusualProperty() {
-        return state.unusual.getReadOnlyProperty();
+        unusual.set(on.get() != usual);
+        limits.set(usual ? "Usually on" : "Usually off");
     }
 }

@@ -2,23 +2,17 @@ package tideband.window.entry;
 
 import java.util.Objects;
 import java.util.Optional;
-import javafx.beans.property.ReadOnlyBooleanProperty;
-import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 
 /** A setting that is typed: what is typed changes nothing until it is committed and found acceptable. */
-public abstract sealed class TypedSetting implements Setting permits NumberSetting, TextSetting {
-    private final About about;
-    private final Terms terms;
+public abstract sealed class TypedSetting extends Setting permits NumberSetting, TextSetting {
     private final StringProperty typed = new SimpleStringProperty("");
-    private final State state = new State();
     private Object seen;
     private String shown = "";
 
     TypedSetting(About about, Terms terms) {
-        this.about = about;
-        this.terms = terms;
+        super(about, terms);
     }
 
     /** What the setting stands for now; empty where it stands for several things that differ. */
@@ -84,9 +78,9 @@ public abstract sealed class TypedSetting implements Setting permits NumberSetti
             restore();
             return true;
         }
-        String fault = state.lock.get().isEmpty() ? accept(text) : state.lock.get();
-        if (!fault.isEmpty()) {
-            state.fault.set(fault);
+        String reason = lock.get().isEmpty() ? accept(text) : lock.get();
+        if (!reason.isEmpty()) {
+            fault.set(reason);
             return false;
         }
         seen = null;
@@ -102,15 +96,15 @@ public abstract sealed class TypedSetting implements Setting permits NumberSetti
 
     @Override
     public void refresh() {
-        state.keepTo(terms);
-        state.bounds.set(boundsNow());
-        state.unusual.set(unusualNow());
+        keepToTerms();
+        limits.set(boundsNow());
+        unusual.set(unusualNow());
         Seen now = new Seen(now(), shownNow());
         if (!Objects.equals(seen, now)) {
             seen = now;
             shown = now.text;
             typed.set(now.text);
-            state.fault.set("");
+            fault.set("");
         }
     }
 
@@ -118,41 +112,11 @@ public abstract sealed class TypedSetting implements Setting permits NumberSetti
     private record Seen(Optional<?> value, String text) {}
 
     @Override
-    public About about() {
-        return about;
-    }
-
-    @Override
-    public ReadOnlyBooleanProperty placedProperty() {
-        return state.placed.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty lockProperty() {
-        return state.lock.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty boundsProperty() {
-        return state.bounds.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyStringProperty faultProperty() {
-        return state.fault.getReadOnlyProperty();
-    }
-
-    @Override
-    public ReadOnlyBooleanProperty unusualProperty() {
-        return state.unusual.getReadOnlyProperty();
-    }
-
-    @Override
     public void backToUsual() {
-        if (state.unusual.get() && state.lock.get().isEmpty()) {
-            String fault = setUsual();
+        if (unusual.get() && lock.get().isEmpty()) {
+            String reason = setUsual();
             restore();
-            state.fault.set(fault);
+            fault.set(reason);
         }
     }
 }

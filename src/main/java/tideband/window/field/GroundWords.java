@@ -1,5 +1,7 @@
 package tideband.window.field;
 
+import java.util.Optional;
+import javafx.geometry.Rectangle2D;
 import javafx.scene.canvas.GraphicsContext;
 import tideband.design.Design;
 import tideband.match.VoltScale;
@@ -7,6 +9,8 @@ import tideband.piece.End;
 
 /** Says what the hatches of the ground mean; over the drawing, so that no line crosses the words. */
 final class GroundWords {
+    private static final double WORDS_EMS = 0.85;
+
     private final Brush brush;
 
     GroundWords(Brush brush) {
@@ -14,8 +18,13 @@ final class GroundWords {
     }
 
     void write(FieldShown shown) {
-        brush.type(0.85, false);
-        outOfReach(shown.area(), shown.scale(), shown.volts());
+        brush.type(WORDS_EMS, false);
+        outOfReachPlate(shown)
+                .ifPresent(plate -> brush.plate(
+                        plate.words(),
+                        plate.leftPx(),
+                        plate.middlePx(),
+                        brush.look().ink()));
         Design design = shown.design();
         boolean both = design.holding().endsDown().size() > 1;
         for (End down : design.holding().endsDown()) {
@@ -28,10 +37,18 @@ final class GroundWords {
         }
     }
 
-    private void outOfReach(FieldArea area, NmScale scale, VoltScale volts) {
-        double ceilingPx = scale.px(volts.ceilingNm());
+    /** Where the words for what is out of reach stand, so that names can keep off them; nowhere where all is in reach. */
+    Optional<Rectangle2D> outOfReachPlace(FieldShown shown) {
+        brush.type(WORDS_EMS, false);
+        return outOfReachPlate(shown).map(plate -> plate.place(brush));
+    }
+
+    private Optional<Plate> outOfReachPlate(FieldShown shown) {
+        FieldArea area = shown.area();
+        VoltScale volts = shown.volts();
+        double ceilingPx = shown.scale().px(volts.ceilingNm());
         if (ceilingPx <= area.topPx()) {
-            return;
+            return Optional.empty();
         }
         String above = "out of reach above " + FieldWords.nm(Math.floor(volts.ceilingNm() * 10) / 10);
         String words = brush.fitting(
@@ -41,11 +58,14 @@ final class GroundWords {
                 "out of reach");
         double bottom = Math.min(ceilingPx, area.bottomPx());
         double middle = Math.max((area.topPx() + bottom) / 2, area.topPx() + brush.heightPx() / 2);
-        brush.plate(
-                words,
-                area.rightPx() - brush.plateWidth(words) - 2 * area.emPx(),
-                middle,
-                brush.look().ink());
+        return Optional.of(new Plate(words, area.rightPx() - brush.plateWidth(words) - 2 * area.emPx(), middle));
+    }
+
+    // Words and the place of their left middle.
+    private record Plate(String words, double leftPx, double middlePx) {
+        Rectangle2D place(Brush brush) {
+            return new Rectangle2D(leftPx, middlePx - brush.heightPx() / 2, brush.plateWidth(words), brush.heightPx());
+        }
     }
 
     private void upright(String words, End down, FieldArea area) {

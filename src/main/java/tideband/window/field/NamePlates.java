@@ -43,8 +43,10 @@ final class NamePlates {
         }
     }
 
-    void write(FieldShown shown) {
+    /** Writes them where nothing else stands, such as the words for what is out of reach. */
+    void write(FieldShown shown, Optional<Rectangle2D> occupied) {
         taken.clear();
+        occupied.ifPresent(taken::add);
         FieldArea area = shown.area();
         List<Band> bands = shown.design().bands();
         List<Spot> spots = new ArrayList<>();

@@ -32,7 +32,7 @@ final class OverlayPainter {
         GraphicsContext gc = brush.gc;
         shown.glance().ifPresent(glance -> glances.paint(shown, glance));
         groundWords.write(shown);
-        names.write(shown);
+        names.write(shown, groundWords.outOfReachPlace(shown));
         brush.wipeAround(area.leftPx(), area.topPx(), area.rightPx(), area.bottomPx());
         hand.crosshair().ifPresent(at -> crosshair(area, at));
         Part under = hand.hovered().orElse(null);

@@ -56,7 +56,7 @@ public final class PacerView extends Region {
     private final Label target = new Label();
     private final DialsView dials = new DialsView();
     private final SentencesView sentences = new SentencesView();
-    private final PieceView piece;
+    private final BathView piece;
     private final ButtonsView buttons;
     private final Label live = new Label();
     private final Set<KeyCode> held = EnumSet.noneOf(KeyCode.class);
@@ -82,7 +82,7 @@ public final class PacerView extends Region {
         this.chime = chime;
         this.leave = leave;
         this.next = next;
-        this.piece = new PieceView(model);
+        this.piece = new BathView(model);
         this.buttons = new ButtonsView(model, this::perform);
         getStylesheets().add(PacerView.class.getResource("pacer.css").toExternalForm());
         Look.dress(this, model.look());

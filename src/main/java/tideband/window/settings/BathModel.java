@@ -17,6 +17,7 @@ import javafx.collections.ObservableList;
 import tideband.design.BathFile;
 import tideband.design.Design;
 import tideband.design.Fault;
+import tideband.design.Limits;
 import tideband.design.Range;
 import tideband.design.Reading;
 import tideband.edit.DesignEdits;
@@ -240,7 +241,7 @@ public final class BathModel {
                                 "Film a volt",
                                 "The ratio at 0.1 mA/cm²: what decides the volts of a colour most of all."),
                         new Measure.Plain("nm/V", 4),
-                        new Range(0.1, 20),
+                        Limits.BATH_NM_PER_VOLT,
                         Bath::nmPerVolt,
                         OwnBath.Figure.RATIO),
                 number(
@@ -250,13 +251,13 @@ public final class BathModel {
                                 "How steeply current rises with the field, at 0.1 mA/cm². A steep one makes films depend less on"
                                         + " the time held."),
                         new Measure.Plain("", 4),
-                        new Range(5, 200),
+                        Limits.BATH_FIELD_SLOPE,
                         Bath::fieldSlope,
                         OwnBath.Figure.SLOPE),
                 number(
                         new About("native film", "Native film", "The film the metal has before it is anodized."),
                         new Measure.Plain("nm", 3),
-                        new Range(0.1, 20),
+                        Limits.BATH_NATIVE_NM,
                         Bath::nativeNm,
                         OwnBath.Figure.NATIVE),
                 number(
@@ -265,7 +266,7 @@ public final class BathModel {
                                 "Efficiency",
                                 "The share of the current that grows oxide, 1 for all of it."),
                         new Measure.Plain("", 4),
-                        new Range(0.01, 1),
+                        Limits.BATH_EFFICIENCY,
                         Bath::efficiency,
                         OwnBath.Figure.EFFICIENCY),
                 number(
@@ -274,7 +275,7 @@ public final class BathModel {
                                 "Resistance",
                                 "Between the supply's terminals and the film: leads, contacts and electrolyte."),
                         new Measure.Plain("ohm", 3),
-                        new Range(0, 10_000),
+                        Limits.BATH_RESISTANCE_OHM,
                         Bath::resistanceOhm,
                         OwnBath.Figure.RESISTANCE),
                 number(
@@ -283,7 +284,7 @@ public final class BathModel {
                                 "Ceiling",
                                 "Volts not to be passed in this bath: above, film cracks or sparks."),
                         new Measure.Plain("V", 2),
-                        new Range(1, 500),
+                        Limits.BATH_CEILING_VOLTS,
                         Bath::ceilingVolts,
                         OwnBath.Figure.CEILING),
                 number(
@@ -292,7 +293,7 @@ public final class BathModel {
                                 "Index scale",
                                 "Factor on the oxide's refractive index, 1 for the published constants."),
                         new Measure.Plain("", 4),
-                        new Range(0.5, 1.5),
+                        Limits.BATH_INDEX_SCALE,
                         Bath::indexScale,
                         OwnBath.Figure.INDEX));
     }

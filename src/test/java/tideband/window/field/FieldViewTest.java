@@ -25,7 +25,6 @@ import tideband.design.Band;
 import tideband.design.Design;
 import tideband.design.Edge;
 import tideband.design.Wanted;
-import tideband.edit.BandEdits;
 import tideband.edit.Part;
 import tideband.edit.Selection;
 import tideband.piece.End;
@@ -36,8 +35,8 @@ import tideband.window.look.Look;
 /** Drawing with hand and keyboard in a real scene. */
 @ScreenTest
 class FieldViewTest {
-    private final Design start = BandEdits.withBands(
-            Desk.shipped("lantern-hook"), List.of(new Band("hook", 0, 160, new Wanted.Film(80, 80), Edge.SOFT)));
+    private final Design start = Desk.shipped("lantern-hook")
+            .withBands(List.of(new Band("hook", 0, 160, new Wanted.Film(80, 80), Edge.SOFT)));
     private final FieldDesk field = new FieldDesk(start);
     private FieldView view;
     private Scene scene;

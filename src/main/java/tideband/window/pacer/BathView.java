@@ -28,7 +28,7 @@ import tideband.window.look.Look;
  * The piece upright, the end that is down at the bottom, with its marks, its masks and the bath. What stands still is painted
  * once; only the water moves.
  */
-final class PieceView extends Region {
+final class BathView extends Region {
     private static final Color WATER_IN_DARK = Color.web("#6db3e8", 0.30);
     private static final Color WATER_IN_LIGHT = Color.web("#2a6fa8", 0.22);
 
@@ -53,7 +53,7 @@ final class PieceView extends Region {
     private double across;
     private String nowHex = "";
 
-    PieceView(PacerModel model) {
+    BathView(PacerModel model) {
         this.model = model;
         this.plan = model.script().plan();
         this.piece = plan.design().piece();

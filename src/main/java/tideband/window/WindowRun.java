@@ -16,7 +16,7 @@ import tideband.window.comfort.LengthUnit;
 import tideband.window.files.FilesView;
 
 /** The program in its window: reads what is kept between runs, opens the window, and keeps what is to be kept. */
-final class TidebandApplication {
+final class WindowRun {
     private final Path state = StateFolder.usual();
     private final Path preferencesFile = state.resolve("preferences");
     private final ComfortModel comfort = new ComfortModel();
